@@ -1,0 +1,53 @@
+// Quantities: what a number means, as a type. Kernels take and return these, always in SI.
+#pragma once
+
+#include <cstdint>
+
+namespace busbar {
+
+/// What a number measures. The unit in which a user sees it follows from this and the unit set
+/// (catalogue/units.hpp). Absolute pressure, gauge pressure and vacuum are separate quantities, and
+/// so are a temperature and a temperature difference: none may pass for the other.
+enum class Quantity : std::uint8_t {
+  number,                  ///< plain number or ratio, the same in every unit set
+  fraction,                ///< part of a whole; 0.38, shown by Calc as 38 %
+  pressure,                ///< absolute, Pa
+  gauge_pressure,          ///< above ambient, Pa
+  vacuum,                  ///< below ambient, Pa
+  temperature,             ///< K
+  temperature_difference,  ///< K
+  enthalpy,                ///< specific, J/kg
+  entropy,                 ///< specific, J/(kg K)
+  volume,                  ///< specific, m3/kg
+  density,                 ///< kg/m3
+  flow,                    ///< mass flow, kg/s
+  power,                   ///< W
+  heat_rate,               ///< fuel energy per unit of electricity, J/J
+  same_unit,               ///< any unit; the result of the function is in the same one
+  count_
+};
+
+/// A number with its quantity. `si` is in the SI unit named above.
+template <Quantity Q>
+struct Of {
+  static constexpr Quantity quantity = Q;
+  double si = 0;
+};
+
+using Number = Of<Quantity::number>;
+using Fraction = Of<Quantity::fraction>;
+using Pressure = Of<Quantity::pressure>;
+using GaugePressure = Of<Quantity::gauge_pressure>;
+using Vacuum = Of<Quantity::vacuum>;
+using Temperature = Of<Quantity::temperature>;
+using TemperatureDifference = Of<Quantity::temperature_difference>;
+using Enthalpy = Of<Quantity::enthalpy>;
+using Entropy = Of<Quantity::entropy>;
+using Volume = Of<Quantity::volume>;
+using Density = Of<Quantity::density>;
+using Flow = Of<Quantity::flow>;
+using Power = Of<Quantity::power>;
+using HeatRate = Of<Quantity::heat_rate>;
+using SameUnit = Of<Quantity::same_unit>;
+
+}  // namespace busbar
