@@ -10,7 +10,7 @@
 
 namespace busbar {
 
-/// Why a call has no answer. The mapping to Calc's errors stands in catalogue/value.hpp.
+/// Why a call has no answer. The mapping to kinds of Calc error stands in abi/values.cpp.
 enum class Fault : std::uint8_t {
   none,
   missing,         ///< empty text or a blank where a value is needed
@@ -23,7 +23,6 @@ enum class Fault : std::uint8_t {
   impossible,      ///< against a law of physics or the meaning of the quantity
   no_convergence,  ///< an iteration reached its cap
   too_large,       ///< beyond the stated limits on sizes
-  passed_on,       ///< an argument was itself an error
   internal         ///< a defect of the engine
 };
 
@@ -37,12 +36,15 @@ struct Measure {
 ///
 /// `argument` counts the inputs of the call that failed from 1; 0 means no single one. Whoever calls
 /// that function with its own inputs in another order says so with `about`.
+/// `row` and `column` count from 1 where the input is a whole range and one cell of it is to blame.
 /// `reason` is a static text in which {0}, {1}, {2} stand for the measures.
 struct Failure {
   Fault fault = Fault::none;
   std::uint8_t argument = 0;
   const char* reason = "";
   std::array<Measure, 3> measures{};
+  std::uint32_t row = 0;
+  std::uint32_t column = 0;
 
   [[nodiscard]] Failure about(std::uint8_t input) const {
     Failure moved = *this;

@@ -1,0 +1,76 @@
+#include "core/units.hpp"
+
+#include <array>
+#include <cstddef>
+
+#include "core/text.hpp"
+
+namespace busbar {
+namespace {
+
+constexpr std::size_t kSets = static_cast<std::size_t>(UnitSet::count_);
+constexpr std::size_t kQuantities = static_cast<std::size_t>(Quantity::count_);
+
+// Exact definitions: 1 lb = 0.453 592 37 kg, 1 ft = 0.3048 m, 1 in = 0.0254 m, 1 lbf = 1 lb times
+// 9.806 65 m/s2, 1 Btu (International Table) = 1055.055 852 62 J, so that 1 Btu/lb = 2326 J/kg and
+// 1 Btu/(lb °F) = 4186.8 J/(kg K) exactly (NIST SP 811, appendix B, footnotes 9 and 22).
+constexpr double kPound = 0.45359237;
+constexpr double kCubicFoot = 0.3048 * 0.3048 * 0.3048;
+constexpr double kPsi = kPound * 9.80665 / (0.0254 * 0.0254);
+constexpr double kBtu = 1055.05585262;
+constexpr double kFahrenheitZero = 459.67 * 5 / 9;
+
+struct QuantityUnits {
+  std::string_view name;
+  std::array<Unit, kSets> units;  // metric, us, si
+};
+
+constexpr Unit kOne{"", 1, 1, 0};
+
+constexpr std::array<QuantityUnits, kQuantities> kTable{{
+    {"number", {kOne, kOne, kOne}},
+    {"fraction", {kOne, kOne, kOne}},
+    {"absolute pressure", {{{"bar", 1e5, 1, 0}, {"psia", kPsi, 1, 0}, {"Pa", 1, 1, 0}}}},
+    {"gauge pressure", {{{"bar", 1e5, 1, 0}, {"psi", kPsi, 1, 0}, {"Pa", 1, 1, 0}}}},
+    {"vacuum", {{{"bar", 1e5, 1, 0}, {"psi", kPsi, 1, 0}, {"Pa", 1, 1, 0}}}},
+    {"temperature",
+     {{{"°C", 1, 1, 273.15}, {"°F", 5, 9, kFahrenheitZero}, {"K", 1, 1, 0}}}},
+    {"temperature difference", {{{"K", 1, 1, 0}, {"°F", 5, 9, 0}, {"K", 1, 1, 0}}}},
+    {"specific enthalpy", {{{"kJ/kg", 1e3, 1, 0}, {"Btu/lb", 2326, 1, 0}, {"J/kg", 1, 1, 0}}}},
+    {"specific entropy",
+     {{{"kJ/(kg K)", 1e3, 1, 0}, {"Btu/(lb °F)", 4186.8, 1, 0}, {"J/(kg K)", 1, 1, 0}}}},
+    {"specific volume",
+     {{{"m³/kg", 1, 1, 0}, {"ft³/lb", kCubicFoot / kPound, 1, 0}, {"m³/kg", 1, 1, 0}}}},
+    {"density", {{{"kg/m³", 1, 1, 0}, {"lb/ft³", kPound / kCubicFoot, 1, 0}, {"kg/m³", 1, 1, 0}}}},
+    {"mass flow", {{{"kg/s", 1, 1, 0}, {"lb/h", kPound, 3600, 0}, {"kg/s", 1, 1, 0}}}},
+    {"power", {{{"MW", 1e6, 1, 0}, {"MW", 1e6, 1, 0}, {"W", 1, 1, 0}}}},
+    {"heat rate", {{{"kJ/kWh", 1, 3600, 0}, {"Btu/kWh", kBtu, 3.6e6, 0}, {"J/J", 1, 1, 0}}}},
+    {"amount", {kOne, kOne, kOne}},
+}};
+
+constexpr std::array<std::string_view, kSets> kNames{"metric", "us", "si"};
+
+const QuantityUnits& entry(Quantity quantity) {
+  return kTable[static_cast<std::size_t>(quantity)];
+}
+
+}  // namespace
+
+const Unit& unit_of(UnitSet set, Quantity quantity) {
+  return entry(quantity).units[static_cast<std::size_t>(set)];
+}
+
+bool depends_on_unit_set(Quantity quantity) { return !entry(quantity).units[0].symbol.empty(); }
+
+std::optional<UnitSet> unit_set_named(std::string_view word) {
+  for (std::size_t i = 0; i < kSets; ++i) {
+    if (equal_ignoring_case(word, kNames[i])) return static_cast<UnitSet>(i);
+  }
+  return std::nullopt;
+}
+
+std::string_view name_of(UnitSet set) { return kNames[static_cast<std::size_t>(set)]; }
+
+std::string_view name_of(Quantity quantity) { return entry(quantity).name; }
+
+}  // namespace busbar
