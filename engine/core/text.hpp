@@ -13,7 +13,7 @@ bool equal_ignoring_case(std::string_view a, std::string_view b);
 /// Without spaces and tabs at both ends.
 std::string_view trimmed(std::string_view text);
 
-/// Appends a number with up to `significant` digits (1 to 17), trailing zeros dropped, a point as
+/// Appends a number with up to `significant` digits (1 to 15), trailing zeros dropped, a point as
 /// decimal sign; plain notation from 1e-4 to 1e15, otherwise with an exponent.
 void append_number(std::string& out, double value, int significant);
 

@@ -1,0 +1,184 @@
+#include "catalogue/arguments.hpp"
+
+#include <cmath>
+
+#include "catalogue/sentence.hpp"
+#include "core/text.hpp"
+#include "stream/text.hpp"
+
+namespace busbar {
+namespace {
+
+constexpr std::size_t kQuoted = 60;
+constexpr double kHundredPercent = 100;
+
+std::string quoted(std::string_view text) {
+  std::string word(text.substr(0, prefix_at_boundary(text, kQuoted)));
+  if (word.size() < text.size()) word += "…";
+  return word;
+}
+
+std::uint8_t position(std::size_t index) { return static_cast<std::uint8_t>(index + 1); }
+
+Trouble trouble(Fault fault, std::size_t index, const char* reason, std::string word = {}) {
+  return {{fault, position(index), reason}, std::move(word)};
+}
+
+// A cell that cannot be read as what is needed, for whatever reason.
+Trouble not_a(const char* needed_but_text, const char* needed_but_logical, std::size_t index,
+              const Cell& cell) {
+  if (std::holds_alternative<Blank>(cell)) return trouble(Fault::missing, index, "is blank");
+  if (const auto* text = std::get_if<std::string>(&cell)) {
+    if (text->empty()) return trouble(Fault::missing, index, "is empty");
+    return trouble(Fault::wrong_kind, index, needed_but_text, quoted(*text));
+  }
+  if (const auto* error = std::get_if<Error>(&cell)) {
+    const Problem& inner = error->problem();
+    return trouble(inner.failure.fault, index, "is itself an error",
+                   inner.row != nullptr ? sentence(inner) : std::string{});
+  }
+  return trouble(Fault::wrong_kind, index, needed_but_logical);
+}
+
+// A zero that is out of range may be a blank cell: Calc hands both over as 0.
+Failure outside(std::size_t index, const Argument& argument, Quantity quantity, double number,
+                double si) {
+  const Measure value{si, quantity};
+  const std::uint8_t at = position(index);
+  if (si < argument.low) {
+    if (argument.low == kAboveZero) {
+      if (number == 0) return {Fault::zero_or_blank, at, "is zero or blank"};
+      return {Fault::outside_range, at, "{0} is not above zero", {{value}}};
+    }
+    const Measure limit{argument.low, quantity};
+    if (number == 0) {
+      return {Fault::zero_or_blank,
+              at,
+              "is zero or blank, and {0} is below {1}, the least that is taken",
+              {{value, limit}}};
+    }
+    return {Fault::outside_range, at, "{0} is below {1}, the least that is taken", {{value, limit}}};
+  }
+  const Measure limit{argument.high, quantity};
+  if (quantity == Quantity::fraction && si <= kHundredPercent) {
+    const Measure meant{si / kHundredPercent, quantity};
+    return {Fault::outside_range,
+            at,
+            "{0} is above {1}: a fraction is meant, {2} if this was a percentage",
+            {{value, limit, meant}}};
+  }
+  return {Fault::outside_range, at, "{0} is above {1}, the most that is taken", {{value, limit}}};
+}
+
+Trouble read_number(const Row& row, std::size_t index, const Cell& cell, UnitSet units,
+                    double& si) {
+  const double* number = std::get_if<double>(&cell);
+  if (number == nullptr) {
+    return not_a("is a text where a number is needed", "is a logical where a number is needed",
+                 index, cell);
+  }
+  if (!std::isfinite(*number)) {
+    return trouble(Fault::outside_range, index, "is not a finite number");
+  }
+  const Argument& argument = row.arguments[index];
+  const Quantity quantity = row.types[index].quantity;
+  si = unit_of(units, quantity).to_si(*number);
+  if (si >= argument.low && si <= argument.high) [[likely]] return {};
+  return {outside(index, argument, quantity, *number, si), {}};
+}
+
+Trouble read_stream_cell(std::size_t index, const Cell& cell, std::optional<Stream>& stream) {
+  const auto* text = std::get_if<std::string>(&cell);
+  if (text == nullptr || text->empty()) {
+    if (const double* number = std::get_if<double>(&cell); number != nullptr && *number == 0) {
+      return trouble(Fault::missing, index, "is zero or blank where a stream is needed");
+    }
+    if (std::holds_alternative<double>(cell)) {
+      return trouble(Fault::wrong_kind, index, "is a number where a stream is needed");
+    }
+    return not_a("", "is a logical where a stream is needed", index, cell);
+  }
+  const Outcome<Stream> read = read_stream(*text);
+  if (!read) {
+    return {read.failure().about(position(index)), quoted(*text)};
+  }
+  stream = *read;
+  return {};
+}
+
+Trouble read_word(std::size_t index, const Cell& cell, Slot& slot) {
+  const auto* text = std::get_if<std::string>(&cell);
+  if (text != nullptr && !text->empty()) {
+    slot.word = *text;
+    return {};
+  }
+  if (const double* number = std::get_if<double>(&cell)) {
+    if (*number == 0) return trouble(Fault::missing, index, "is zero or blank where a word is needed");
+    return trouble(Fault::wrong_kind, index, "is a number where a word is needed");
+  }
+  return not_a("", "is a logical where a word is needed", index, cell);
+}
+
+}  // namespace
+
+bool is_lifted(Kind kind) {
+  return kind == Kind::number || kind == Kind::stream || kind == Kind::word;
+}
+
+Trouble read_cell(const Row& row, std::size_t index, const Cell& cell, UnitSet units,
+                  Workspace& space, Slot& slot) {
+  slot.given = true;
+  switch (row.types[index].kind) {
+    case Kind::number:
+      return read_number(row, index, cell, units, slot.si);
+    case Kind::stream: {
+      Trouble found = read_stream_cell(index, cell, space.stream[index]);
+      if (!found) slot.stream = &*space.stream[index];
+      return found;
+    }
+    case Kind::word:
+      return read_word(index, cell, slot);
+    default:
+      return {};
+  }
+}
+
+Trouble read_range(const Row& row, std::size_t index, const Grid& grid, UnitSet units,
+                   Workspace& space, Slot& slot) {
+  slot.given = true;
+  const bool of_streams = row.types[index].kind == Kind::streams;
+  auto& numbers = space.numbers[index];
+  auto& streams = space.streams[index];
+  const std::size_t cells = grid.rows() * grid.columns();
+  if (of_streams) {
+    streams.reserve(cells);
+  } else {
+    numbers.reserve(cells);
+  }
+  for (std::size_t r = 0; r < grid.rows(); ++r) {
+    for (std::size_t c = 0; c < grid.columns(); ++c) {
+      Trouble found;
+      if (of_streams) {
+        std::optional<Stream> stream;
+        found = read_stream_cell(index, grid.at(r, c), stream);
+        if (stream) streams.push_back(*stream);
+      } else {
+        double si = 0;
+        found = read_number(row, index, grid.at(r, c), units, si);
+        numbers.push_back(si);
+      }
+      if (found) {
+        if (!grid.is_single()) {
+          found.failure.row = static_cast<std::uint32_t>(r + 1);
+          found.failure.column = static_cast<std::uint32_t>(c + 1);
+        }
+        return found;
+      }
+    }
+  }
+  slot.numbers = numbers;
+  slot.streams = streams;
+  return {};
+}
+
+}  // namespace busbar

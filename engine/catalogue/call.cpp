@@ -1,0 +1,256 @@
+#include "catalogue/call.hpp"
+
+#include <algorithm>
+#include <cmath>
+
+#include "catalogue/arguments.hpp"
+#include "catalogue/options.hpp"
+#include "catalogue/sentence.hpp"
+#include "stream/text.hpp"
+
+namespace busbar {
+namespace {
+
+struct Shape {
+  std::size_t rows = 1;
+  std::size_t columns = 1;
+};
+
+// One call of a row: its arguments, decoded once where they do not vary.
+class Caller {
+ public:
+  Caller(const Row& row, Arguments arguments) : row_(row), arguments_(arguments) {}
+
+  Grid run() {
+    if (const Trouble found = prepare()) return Grid(error(found));
+    if (shape_.rows * shape_.columns == 1) return finish(read_varying(0, 0));
+    if (row_.result.kind == ResultKind::table) {
+      return Grid(error({{Fault::wrong_shape, 0, "gives a table and takes single cells only"}, {}}));
+    }
+    Grid out(shape_.rows, shape_.columns);
+    for (std::size_t r = 0; r < shape_.rows; ++r) {
+      for (std::size_t c = 0; c < shape_.columns; ++c) {
+        const Trouble found = read_varying(r, c);
+        out.at(r, c) = found ? error(found) : compute();
+      }
+    }
+    return out;
+  }
+
+  [[nodiscard]] UnitSet units() const { return units_; }
+
+  // After a run that worked: what the first cell's computation has to say.
+  void explain_first(std::string& text) {
+    if (prepare() || read_varying(0, 0)) return;
+    Result result;
+    if (row_.thunk(slots_.data(), units_, result).fault != Fault::none) return;
+    if (row_.explain != nullptr) row_.explain(slots_.data(), result, units_, text);
+    for (std::size_t i = 0; i < row_.arguments.size(); ++i) {
+      const bool zero_temperature = row_.types[i].kind == Kind::number && slots_[i].given &&
+                                    row_.types[i].quantity == Quantity::temperature &&
+                                    unit_of(units_, Quantity::temperature).to_si(0) == slots_[i].si;
+      if (!zero_temperature) continue;
+      text += " Note: ";
+      text += row_.arguments[i].name;
+      text += " is exactly 0; Calc hands a blank cell over as 0 too.";
+    }
+  }
+
+ private:
+  [[nodiscard]] const Grid* given(std::size_t index) const {
+    return index < arguments_.size() ? arguments_[index] : nullptr;
+  }
+
+  [[nodiscard]] bool has_rest() const {
+    return !row_.types.empty() && row_.types.back().kind == Kind::rest;
+  }
+
+  Trouble prepare() {
+    if (arguments_.size() > row_.argument_count() && !has_rest()) {
+      return {{Fault::wrong_shape,
+               0,
+               "takes {0} arguments at the most; {1} were given",
+               {{{static_cast<double>(row_.argument_count()), Quantity::number},
+                 {static_cast<double>(arguments_.size()), Quantity::number}}}},
+              {}};
+    }
+    if (Trouble found = read_units()) return found;
+    for (std::size_t i = 0; i < row_.arguments.size(); ++i) {
+      if (Trouble found = read_constant(i)) return found;
+    }
+    return {};
+  }
+
+  Trouble read_units() {
+    if (!row_.has_options) return {};
+    const Grid* grid = given(row_.arguments.size());
+    const auto at = static_cast<std::uint8_t>(row_.arguments.size() + 1);
+    if (grid == nullptr) return {};
+    if (!grid->is_single()) {
+      return {{Fault::wrong_shape, at, "is a range; one cell with the unit set is needed"}, {}};
+    }
+    const Cell& cell = grid->at(0, 0);
+    const auto* text = std::get_if<std::string>(&cell);
+    if (text == nullptr || text->empty()) {
+      const bool empty = text != nullptr || std::holds_alternative<Blank>(cell);
+      return {{empty ? Fault::missing : Fault::wrong_kind, at,
+               "holds no unit set; leave it out or write \"metric\", \"us\" or \"si\""},
+              {}};
+    }
+    Trouble found;
+    const Outcome<Options> options = read_options(*text, found.word);
+    if (!options) {
+      found.failure = options.failure().about(at);
+      return found;
+    }
+    units_ = options->units;
+    return {};
+  }
+
+  // Reads what is the same for every cell of the result and finds the shape of the rest.
+  Trouble read_constant(std::size_t index) {
+    const Type& type = row_.types[index];
+    if (type.kind == Kind::rest) {
+      slots_[index].rest = arguments_.subspan(std::min(index, arguments_.size()));
+      return {};
+    }
+    const Grid* grid = given(index);
+    if (grid == nullptr) {
+      if (type.optional) return {};
+      return {{Fault::missing, static_cast<std::uint8_t>(index + 1), "is left out"}, {}};
+    }
+    if (!is_lifted(type.kind)) {
+      if (type.kind == Kind::cell) return {};
+      return read_range(row_, index, *grid, units_, space_, slots_[index]);
+    }
+    if (grid->is_single()) {
+      return read_cell(row_, index, grid->at(0, 0), units_, space_, slots_[index]);
+    }
+    varying_[varying_count_++] = index;
+    const auto fit = [](std::size_t& whole, std::size_t part) {
+      if (part == 1 || part == whole) return true;
+      if (whole != 1) return false;
+      whole = part;
+      return true;
+    };
+    if (!fit(shape_.rows, grid->rows()) || !fit(shape_.columns, grid->columns())) {
+      return {{Fault::wrong_shape,
+               static_cast<std::uint8_t>(index + 1),
+               "has {0} rows and {1} columns, which fits no other range of the call",
+               {{{static_cast<double>(grid->rows()), Quantity::number},
+                 {static_cast<double>(grid->columns()), Quantity::number}}}},
+              {}};
+    }
+    if (shape_.rows * shape_.columns > kCellLimit) {
+      return {{Fault::too_large, 0, "would fill more cells than one call may"}, {}};
+    }
+    return {};
+  }
+
+  Trouble read_varying(std::size_t r, std::size_t c) {
+    for (std::size_t i = 0; i < varying_count_; ++i) {
+      const std::size_t index = varying_[i];
+      const Grid& grid = *arguments_[index];
+      const Cell& cell = grid.at(grid.rows() == 1 ? 0 : r, grid.columns() == 1 ? 0 : c);
+      if (Trouble found = read_cell(row_, index, cell, units_, space_, slots_[index])) return found;
+    }
+    return {};
+  }
+
+  Grid finish(const Trouble& found) {
+    if (found) return Grid(error(found));
+    if (row_.result.kind != ResultKind::table) return Grid(compute());
+    Result result;
+    const Failure failure = row_.thunk(slots_.data(), units_, result);
+    if (failure.fault != Fault::none) return Grid(error(about(failure)));
+    return std::move(result.table);
+  }
+
+  Cell compute() {
+    Result result;
+    const Failure failure = row_.thunk(slots_.data(), units_, result);
+    if (failure.fault != Fault::none) return error(about(failure));
+    switch (row_.result.kind) {
+      case ResultKind::number: {
+        const double number = unit_of(units_, row_.result.quantity).from_si(result.si);
+        if (std::isfinite(number)) return number;
+        return error({{Fault::outside_range, 0, "has no finite result for these arguments"}, {}});
+      }
+      case ResultKind::stream: {
+        std::string text;
+        text.reserve(160);
+        write_stream(text, result.stream, row_.has_options ? units_ : face_of_first_stream());
+        return text;
+      }
+      case ResultKind::text:
+        return std::move(result.text.value);
+      case ResultKind::table:
+        break;
+    }
+    return error({{Fault::internal, 0, "has a defect: please report it"}, {}});
+  }
+
+  // A function without options writes the stream as its first stream was written.
+  [[nodiscard]] UnitSet face_of_first_stream() const {
+    for (const Slot& slot : slots_) {
+      if (slot.stream != nullptr) return slot.stream->face;
+      if (!slot.streams.empty()) return slot.streams.front().face;
+    }
+    return UnitSet::metric;
+  }
+
+  // Adds the word that a failing kernel was given.
+  [[nodiscard]] Trouble about(const Failure& failure) const {
+    Trouble found{failure, {}};
+    const std::size_t index = failure.argument;
+    if (index > 0 && index <= row_.types.size() && row_.types[index - 1].kind == Kind::word) {
+      found.word = slots_[index - 1].word;
+    }
+    return found;
+  }
+
+  [[nodiscard]] Cell error(const Trouble& found) const {
+    return Error({found.failure, &row_, units_, found.word});
+  }
+
+  const Row& row_;
+  Arguments arguments_;
+  UnitSet units_ = UnitSet::metric;
+  Shape shape_;
+  std::array<Slot, kMostArguments> slots_;
+  std::array<std::size_t, kMostArguments> varying_{};
+  std::size_t varying_count_ = 0;
+  Workspace space_;
+};
+
+void append_place(std::string& text, const Grid& grid, std::size_t r, std::size_t c) {
+  if (grid.is_single()) return;
+  text += "Row " + std::to_string(r + 1) + ", column " + std::to_string(c + 1) + " of the result: ";
+}
+
+}  // namespace
+
+Grid call(const Row& row, Arguments arguments) { return Caller(row, arguments).run(); }
+
+std::string explain(const Row& row, Arguments arguments) {
+  const Grid result = call(row, arguments);
+  std::string text;
+  for (std::size_t r = 0; r < result.rows(); ++r) {
+    for (std::size_t c = 0; c < result.columns(); ++c) {
+      const auto* error = std::get_if<Error>(&result.at(r, c));
+      if (error == nullptr) continue;
+      append_place(text, result, r, c);
+      text += sentence(error->problem());
+      return text;
+    }
+  }
+  text += row.words.name;
+  text += result.is_single() || row.result.kind == ResultKind::table ? ": works." : ": works; first cell:";
+  Caller(row, arguments).explain_first(text);
+  text += " Source: ";
+  text += source_text(row);
+  text += '.';
+  return text;
+}
+
+}  // namespace busbar

@@ -1,0 +1,21 @@
+// What an explanation says about a stream or a state of water.
+#pragma once
+
+#include <string>
+
+#include "catalogue/row.hpp"
+#include "water/state.hpp"
+
+namespace busbar::functions {
+
+/// Tag, phase, region with its equation, distance from saturation, validity.
+void describe_state(std::string& text, const water::State& state, UnitSet units);
+void describe_stream(std::string& text, const Stream& stream, UnitSet units);
+
+/// Explain hooks for rows: the stream that comes out, and the streams that go in (arguments 1, 2).
+void explain_result(const Slot* in, const Result& result, UnitSet units, std::string& text);
+void explain_first(const Slot* in, const Result& result, UnitSet units, std::string& text);
+void explain_first_and_second(const Slot* in, const Result& result, UnitSet units,
+                              std::string& text);
+
+}  // namespace busbar::functions

@@ -1,0 +1,30 @@
+// The catalogue: every cell function, chapter by chapter.
+#pragma once
+
+#include <cstddef>
+#include <cstdint>
+#include <span>
+#include <string_view>
+
+#include "catalogue/row.hpp"
+
+namespace busbar::functions {
+
+std::span<const Row> steam();
+std::span<const Row> streams();
+std::span<const Row> machines();
+std::span<const Row> limits();
+std::span<const Row> performance();
+std::span<const Row> units();
+std::span<const Row> explanation();
+
+/// All rows in the order of the chapters above.
+std::span<const Row* const> all();
+
+/// The row of that name, capitals or not; nullptr when there is none.
+const Row* find(std::string_view name);
+
+/// Changes whenever a name, an argument, its kind or its place changes.
+std::uint64_t fingerprint();
+
+}  // namespace busbar::functions
