@@ -1,10 +1,10 @@
 // What a row of the catalogue is, and how it takes its argument kinds from the kernel's signature.
 //
-// A kernel is a plain function Outcome<R>(A...). Each parameter type below stands for one argument of
-// the cell function; a type without a specialisation of Typed does not compile. The last optional
-// argument `options` is there by itself whenever an argument or the result depends on the unit set.
-// Decoding, ranges, units and lifting are one routine for all rows (call.cpp); per kernel there is
-// one thunk of a few instructions.
+// A kernel is a plain function Outcome<R>(A...). Each parameter type below stands for one argument
+// of the cell function; a type without a specialisation of Typed does not compile. The last
+// optional argument `options` is there by itself whenever an argument or the result depends on the
+// unit set. Decoding, ranges, units and lifting are one routine for all rows (call.cpp); per kernel
+// there is one thunk of a few instructions.
 #pragma once
 
 #include <array>

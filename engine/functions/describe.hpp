@@ -12,6 +12,10 @@ namespace busbar::functions {
 void describe_state(std::string& text, const water::State& state, UnitSet units);
 void describe_stream(std::string& text, const Stream& stream, UnitSet units);
 
+/// The failure of asking a single-phase state for its dryness: #N/A, with the distance from
+/// saturation.
+Failure no_dryness(const water::State& state, std::uint8_t argument);
+
 /// Explain hooks for rows: the stream that comes out, and the streams that go in (arguments 1, 2).
 void explain_result(const Slot* in, const Result& result, UnitSet units, std::string& text);
 void explain_first(const Slot* in, const Result& result, UnitSet units, std::string& text);

@@ -41,13 +41,14 @@ std::vector<const Row*> sorted_by_name() {
 }  // namespace
 
 std::span<const Row* const> all() {
-  static const std::vector<const Row*> rows = gather();
+  // Never destroyed: the office may still call while the process ends.
+  static const auto& rows = *new std::vector<const Row*>(gather());
   return rows;
 }
 
 const Row* find(std::string_view name) {
   if (name.empty() || name.size() > kLongestName) return nullptr;
-  static const std::vector<const Row*> rows = sorted_by_name();
+  static const auto& rows = *new std::vector<const Row*>(sorted_by_name());
   const std::string wanted = capitals(name);
   const auto at = std::lower_bound(
       rows.begin(), rows.end(), std::string_view(wanted),

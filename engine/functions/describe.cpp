@@ -1,0 +1,106 @@
+#include "functions/describe.hpp"
+
+#include <cmath>
+
+#include "catalogue/sentence.hpp"
+#include "core/text.hpp"
+#include "water/describe.hpp"
+#include "water/stream.hpp"
+
+namespace busbar::functions {
+namespace {
+
+// A temperature reading and a pressure reading together seldom place a state closer to saturation
+// than this (common practice, no source).
+constexpr double kInstrumentReach = 2;
+
+// Limits of R7-97(2012), section 2.
+constexpr double kLeast = 273.15;
+constexpr double kMiddle = 1073.15;
+constexpr double kMost = 2273.15;
+
+void append_validity(std::string& text, UnitSet units) {
+  text += " IAPWS-IF97 holds from ";
+  append_measure(text, {kLeast, Quantity::temperature}, units);
+  text += " to ";
+  append_measure(text, {kMiddle, Quantity::temperature}, units);
+  text += " up to ";
+  append_measure(text, {100e6, Quantity::pressure}, units);
+  text += ", and to ";
+  append_measure(text, {kMost, Quantity::temperature}, units);
+  text += " up to ";
+  append_measure(text, {50e6, Quantity::pressure}, units);
+  text += '.';
+}
+
+void append_distance(std::string& text, const water::Neighbourhood& near, UnitSet units) {
+  const double distance = std::abs(near.distance);
+  append_measure(text, {distance, Quantity::temperature_difference}, units);
+  text += near.distance > 0 ? " above" : " below";
+  text += " saturation";
+  if (distance >= kInstrumentReach) return;
+  text +=
+      ", within the reach of instruments: pressure and temperature readings cannot tell this state "
+      "from a wet one";
+}
+
+void append_stream(std::string& text, const char* which, const Stream& stream, UnitSet units) {
+  text += which;
+  describe_stream(text, stream, units);
+}
+
+}  // namespace
+
+void describe_state(std::string& text, const water::State& state, UnitSet units) {
+  text += ' ';
+  text += water::region_name(state.region);
+  text += ", ";
+  text += water::equation(state.region);
+  if (state.region == water::Region::two_phase) {
+    text += ", dryness ";
+    append_number(text, state.dryness, 6);
+  } else if (const auto near = water::neighbourhood(state); near.has_saturation) {
+    text += ", ";
+    append_distance(text, near, units);
+  }
+  text += '.';
+  append_validity(text, units);
+}
+
+void describe_stream(std::string& text, const Stream& stream, UnitSet units) {
+  if (!stream.tag.empty()) {
+    text += ' ';
+    text += stream.tag.text();
+    text += ':';
+  }
+  if (const auto state = water::state_of(stream)) describe_state(text, *state, units);
+}
+
+Failure no_dryness(const water::State& state, std::uint8_t argument) {
+  const auto near = water::neighbourhood(state);
+  if (!near.has_saturation) {
+    return {Fault::missing, argument,
+            "is above the critical pressure or temperature, where there is no dryness"};
+  }
+  const Measure distance{std::abs(near.distance), Quantity::temperature_difference};
+  return {Fault::missing,
+          argument,
+          near.distance > 0 ? "is superheated by {0}: there is no dryness"
+                            : "is subcooled by {0}: there is no dryness",
+          {{distance}}};
+}
+
+void explain_result(const Slot*, const Result& result, UnitSet units, std::string& text) {
+  describe_stream(text, result.stream, units);
+}
+
+void explain_first(const Slot* in, const Result&, UnitSet units, std::string& text) {
+  describe_stream(text, *in[0].stream, units);
+}
+
+void explain_first_and_second(const Slot* in, const Result&, UnitSet units, std::string& text) {
+  append_stream(text, " Inlet:", *in[0].stream, units);
+  append_stream(text, " Outlet:", *in[1].stream, units);
+}
+
+}  // namespace busbar::functions
