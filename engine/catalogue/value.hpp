@@ -51,6 +51,14 @@ class Grid {
   }
   explicit Grid(Cell cell) : single_(std::move(cell)) {}
 
+  // Out of line: inlined moves of the variant make g++ 12 warn of uninitialised members that are
+  // not.
+  Grid(Grid&& other) noexcept;
+  Grid& operator=(Grid&& other) noexcept;
+  Grid(const Grid&) = delete;
+  Grid& operator=(const Grid&) = delete;
+  ~Grid();
+
   [[nodiscard]] std::size_t rows() const { return rows_; }
   [[nodiscard]] std::size_t columns() const { return columns_; }
   [[nodiscard]] bool is_single() const { return cells_.empty(); }
