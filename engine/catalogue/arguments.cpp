@@ -40,6 +40,13 @@ Trouble not_a(const char* needed_but_text, const char* needed_but_logical, std::
   return trouble(Fault::wrong_kind, index, needed_but_logical);
 }
 
+Failure against_limit(Fault fault, std::uint8_t at, const char* reason, Measure value,
+                      Measure limit) {
+  Failure failure{fault, at, reason, {{value, limit}}};
+  failure.limit_of_argument = true;
+  return failure;
+}
+
 // A zero that is out of range may be a blank cell: Calc hands both over as 0.
 Failure outside(std::size_t index, const Argument& argument, Quantity quantity, double number,
                 double si) {
@@ -52,12 +59,10 @@ Failure outside(std::size_t index, const Argument& argument, Quantity quantity, 
     }
     const Measure limit{argument.low, quantity};
     if (number == 0) {
-      return {Fault::zero_or_blank,
-              at,
-              "is zero or blank, and {0} is below {1}, the least that is taken",
-              {{value, limit}}};
+      return against_limit(Fault::zero_or_blank, at, "is zero or blank, and {0} is below {1}",
+                           value, limit);
     }
-    return {Fault::outside_range, at, "{0} is below {1}, the least that is taken", {{value, limit}}};
+    return against_limit(Fault::outside_range, at, "{0} is below {1}", value, limit);
   }
   const Measure limit{argument.high, quantity};
   if (quantity == Quantity::fraction && si <= kHundredPercent) {
@@ -67,7 +72,7 @@ Failure outside(std::size_t index, const Argument& argument, Quantity quantity, 
             "{0} is above {1}: a fraction is meant, {2} if this was a percentage",
             {{value, limit, meant}}};
   }
-  return {Fault::outside_range, at, "{0} is above {1}, the most that is taken", {{value, limit}}};
+  return against_limit(Fault::outside_range, at, "{0} is above {1}", value, limit);
 }
 
 Trouble read_number(const Row& row, std::size_t index, const Cell& cell, UnitSet units,
@@ -83,7 +88,8 @@ Trouble read_number(const Row& row, std::size_t index, const Cell& cell, UnitSet
   const Argument& argument = row.arguments[index];
   const Quantity quantity = row.types[index].quantity;
   si = unit_of(units, quantity).to_si(*number);
-  if (si >= argument.low && si <= argument.high) [[likely]] return {};
+  if (si >= argument.low && si <= argument.high) [[likely]]
+    return {};
   return {outside(index, argument, quantity, *number, si), {}};
 }
 
@@ -113,7 +119,8 @@ Trouble read_word(std::size_t index, const Cell& cell, Slot& slot) {
     return {};
   }
   if (const double* number = std::get_if<double>(&cell)) {
-    if (*number == 0) return trouble(Fault::missing, index, "is zero or blank where a word is needed");
+    if (*number == 0)
+      return trouble(Fault::missing, index, "is zero or blank where a word is needed");
     return trouble(Fault::wrong_kind, index, "is a number where a word is needed");
   }
   return not_a("", "is a logical where a word is needed", index, cell);

@@ -25,7 +25,8 @@ class Caller {
     if (const Trouble found = prepare()) return Grid(error(found));
     if (shape_.rows * shape_.columns == 1) return finish(read_varying(0, 0));
     if (row_.result.kind == ResultKind::table) {
-      return Grid(error({{Fault::wrong_shape, 0, "gives a table and takes single cells only"}, {}}));
+      return Grid(
+          error({{Fault::wrong_shape, 0, "gives a table and takes single cells only"}, {}}));
     }
     Grid out(shape_.rows, shape_.columns);
     for (std::size_t r = 0; r < shape_.rows; ++r) {
@@ -245,7 +246,8 @@ std::string explain(const Row& row, Arguments arguments) {
     }
   }
   text += row.words.name;
-  text += result.is_single() || row.result.kind == ResultKind::table ? ": works." : ": works; first cell:";
+  text += result.is_single() || row.result.kind == ResultKind::table ? " works."
+                                                                     : " works. First cell:";
   Caller(row, arguments).explain_first(text);
   text += " Source: ";
   text += source_text(row);

@@ -158,12 +158,14 @@ struct Typed<UnitSet> {
 inline constexpr double kAboveZero = std::numeric_limits<double>::min();
 inline constexpr double kNoLimit = std::numeric_limits<double>::max();
 
-/// Words and range of one argument. Limits are in SI and inclusive.
+/// Words and range of one argument. Limits are in SI and inclusive. `limit` says whose limits they
+/// are; the sentence about a number outside reads "1200 bar is above 1000 bar, <limit>".
 struct Argument {
   const char* name;
   const char* meaning;
   double low = -kNoLimit;
   double high = kNoLimit;
+  const char* limit = "the limit of this argument";
 };
 
 struct Source {

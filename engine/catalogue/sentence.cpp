@@ -9,7 +9,8 @@ constexpr int kDigits = 6;
 
 constexpr Argument kOptions{
     "options",
-    "Unit set of all numbers of this call: \"metric\" (bar, °C, kJ/kg, kg/s, MW), \"us\" (psia, °F, "
+    "Unit set of all numbers of this call: \"metric\" (bar, °C, kJ/kg, kg/s, MW), \"us\" (psia, "
+    "°F, "
     "Btu/lb, lb/h, MW) or \"si\" (Pa, K, J/kg, kg/s, W); metric when left out"};
 
 std::string number_text(double si, Quantity quantity, UnitSet units) {
@@ -63,13 +64,15 @@ const Argument& options_argument() { return kOptions; }
 std::string sentence(const Problem& problem) {
   const Failure& failure = problem.failure;
   std::string text;
+  const Argument* argument = nullptr;
   if (problem.row != nullptr) {
     text += problem.row->words.name;
     text += ": ";
     const std::size_t index = failure.argument;
     if (index > 0 && index <= problem.row->argument_count()) {
       const bool options = index > problem.row->arguments.size();
-      text += options ? kOptions.name : problem.row->arguments[index - 1].name;
+      argument = options ? &kOptions : &problem.row->arguments[index - 1];
+      text += argument->name;
       text += ' ';
     }
     if (failure.row > 0) {
@@ -83,6 +86,10 @@ std::string sentence(const Problem& problem) {
     text += "\" ";
   }
   append_reason(text, failure, problem.units);
+  if (failure.limit_of_argument && argument != nullptr) {
+    text += ", ";
+    text += argument->limit;
+  }
   return text;
 }
 

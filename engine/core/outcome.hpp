@@ -34,10 +34,10 @@ struct Measure {
 
 /// Why there is no answer.
 ///
-/// `argument` counts the inputs of the call that failed from 1; 0 means no single one. Whoever calls
-/// that function with its own inputs in another order says so with `about`.
-/// `row` and `column` count from 1 where the input is a whole range and one cell of it is to blame.
-/// `reason` is a static text in which {0}, {1}, {2} stand for the measures.
+/// `argument` counts the inputs of the call that failed from 1; 0 means no single one. Whoever
+/// calls that function with its own inputs in another order says so with `about`. `row` and
+/// `column` count from 1 where the input is a whole range and one cell of it is to blame. `reason`
+/// is a static text in which {0}, {1}, {2} stand for the measures.
 struct Failure {
   Fault fault = Fault::none;
   std::uint8_t argument = 0;
@@ -45,6 +45,7 @@ struct Failure {
   std::array<Measure, 3> measures{};
   std::uint32_t row = 0;
   std::uint32_t column = 0;
+  bool limit_of_argument = false;  ///< set by the catalogue: it knows whose limit was crossed
 
   [[nodiscard]] Failure about(std::uint8_t input) const {
     Failure moved = *this;

@@ -33,8 +33,7 @@ constexpr std::array<QuantityUnits, kQuantities> kTable{{
     {"absolute pressure", {{{"bar", 1e5, 1, 0}, {"psia", kPsi, 1, 0}, {"Pa", 1, 1, 0}}}},
     {"gauge pressure", {{{"bar", 1e5, 1, 0}, {"psi", kPsi, 1, 0}, {"Pa", 1, 1, 0}}}},
     {"vacuum", {{{"bar", 1e5, 1, 0}, {"psi", kPsi, 1, 0}, {"Pa", 1, 1, 0}}}},
-    {"temperature",
-     {{{"°C", 1, 1, 273.15}, {"°F", 5, 9, kFahrenheitZero}, {"K", 1, 1, 0}}}},
+    {"temperature", {{{"°C", 1, 1, 273.15}, {"°F", 5, 9, kFahrenheitZero}, {"K", 1, 1, 0}}}},
     {"temperature difference", {{{"K", 1, 1, 0}, {"°F", 5, 9, 0}, {"K", 1, 1, 0}}}},
     {"specific enthalpy", {{{"kJ/kg", 1e3, 1, 0}, {"Btu/lb", 2326, 1, 0}, {"J/kg", 1, 1, 0}}}},
     {"specific entropy",
@@ -50,9 +49,7 @@ constexpr std::array<QuantityUnits, kQuantities> kTable{{
 
 constexpr std::array<std::string_view, kSets> kNames{"metric", "us", "si"};
 
-const QuantityUnits& entry(Quantity quantity) {
-  return kTable[static_cast<std::size_t>(quantity)];
-}
+const QuantityUnits& entry(Quantity quantity) { return kTable[static_cast<std::size_t>(quantity)]; }
 
 }  // namespace
 

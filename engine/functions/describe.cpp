@@ -19,6 +19,8 @@ constexpr double kLeast = 273.15;
 constexpr double kMiddle = 1073.15;
 constexpr double kMost = 2273.15;
 
+}  // namespace
+
 void append_validity(std::string& text, UnitSet units) {
   text += " IAPWS-IF97 holds from ";
   append_measure(text, {kLeast, Quantity::temperature}, units);
@@ -32,6 +34,8 @@ void append_validity(std::string& text, UnitSet units) {
   append_measure(text, {50e6, Quantity::pressure}, units);
   text += '.';
 }
+
+namespace {
 
 void append_distance(std::string& text, const water::Neighbourhood& near, UnitSet units) {
   const double distance = std::abs(near.distance);
@@ -52,7 +56,7 @@ void append_stream(std::string& text, const char* which, const Stream& stream, U
 }  // namespace
 
 void describe_state(std::string& text, const water::State& state, UnitSet units) {
-  text += ' ';
+  text += " State in ";
   text += water::region_name(state.region);
   text += ", ";
   text += water::equation(state.region);
@@ -64,7 +68,6 @@ void describe_state(std::string& text, const water::State& state, UnitSet units)
     append_distance(text, near, units);
   }
   text += '.';
-  append_validity(text, units);
 }
 
 void describe_stream(std::string& text, const Stream& stream, UnitSet units) {
@@ -92,15 +95,18 @@ Failure no_dryness(const water::State& state, std::uint8_t argument) {
 
 void explain_result(const Slot*, const Result& result, UnitSet units, std::string& text) {
   describe_stream(text, result.stream, units);
+  append_validity(text, units);
 }
 
 void explain_first(const Slot* in, const Result&, UnitSet units, std::string& text) {
   describe_stream(text, *in[0].stream, units);
+  append_validity(text, units);
 }
 
 void explain_first_and_second(const Slot* in, const Result&, UnitSet units, std::string& text) {
   append_stream(text, " Inlet:", *in[0].stream, units);
   append_stream(text, " Outlet:", *in[1].stream, units);
+  append_validity(text, units);
 }
 
 }  // namespace busbar::functions

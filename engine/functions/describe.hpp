@@ -8,9 +8,12 @@
 
 namespace busbar::functions {
 
-/// Tag, phase, region with its equation, distance from saturation, validity.
+/// Region with its equation, and the distance from saturation; for a stream its tag too.
 void describe_state(std::string& text, const water::State& state, UnitSet units);
 void describe_stream(std::string& text, const Stream& stream, UnitSet units);
+
+/// Where IAPWS-IF97 holds.
+void append_validity(std::string& text, UnitSet units);
 
 /// The failure of asking a single-phase state for its dryness: #N/A, with the distance from
 /// saturation.

@@ -95,17 +95,23 @@ Outcome<Pressure> saturation_pressure(Temperature t) {
 
 void explain_pt(const Slot* in, const Result&, UnitSet units, std::string& text) {
   const auto state = water::at_pressure_temperature(in[0].si, in[1].si);
-  if (state) describe_state(text, *state, units);
+  if (!state) return;
+  describe_state(text, *state, units);
+  append_validity(text, units);
 }
 
 void explain_ph(const Slot* in, const Result&, UnitSet units, std::string& text) {
   const auto state = water::at_pressure_enthalpy(in[0].si, in[1].si);
-  if (state) describe_state(text, *state, units);
+  if (!state) return;
+  describe_state(text, *state, units);
+  append_validity(text, units);
 }
 
 void explain_ps(const Slot* in, const Result&, UnitSet units, std::string& text) {
   const auto state = water::at_pressure_entropy(in[0].si, in[1].si);
-  if (state) describe_state(text, *state, units);
+  if (!state) return;
+  describe_state(text, *state, units);
+  append_validity(text, units);
 }
 
 void explain_saturation(const Slot*, const Result&, UnitSet units, std::string& text) {
@@ -125,10 +131,11 @@ constexpr double kMostPressure = 100e6;
 constexpr double kLeastTemperature = 273.15;
 constexpr double kMostTemperature = 2273.15;
 
+constexpr const char* kLimit = "the limit of IAPWS-IF97";
 constexpr Argument kPressure{"pressure", "Absolute pressure, never gauge", kAboveZero,
-                             kMostPressure};
+                             kMostPressure, kLimit};
 constexpr Argument kTemperature{"temperature", "Temperature of the fluid", kLeastTemperature,
-                                kMostTemperature};
+                                kMostTemperature, kLimit};
 constexpr Argument kDryness{"dryness", "Mass of vapour over mass of fluid, from 0 to 1", 0, 1};
 constexpr Argument kEnthalpy{"enthalpy", "Specific enthalpy, zero near the triple point of water",
                              -1e4, 8e6};

@@ -49,7 +49,8 @@ constexpr Argument kConversion[] = {
 
 // The least and the greatest ambient pressure at which plant runs (common practice, no source): a
 // reading in millibar or in millimetres of mercury falls outside in every unit set.
-constexpr Argument kAmbient{"ambient", "Ambient pressure at the gauge, absolute", 40e3, 110e3};
+constexpr Argument kAmbient{"ambient", "Ambient pressure at the gauge, absolute", 40e3, 110e3,
+                            "the limit of ambient pressure where plant stands"};
 constexpr Argument kGauge[] = {
     {"gauge", "Reading of the gauge, above ambient positive", -110e3, 100e6}, kAmbient};
 constexpr Argument kVacuum[] = {{"vacuum", "Reading below ambient, positive", 0, 110e3}, kAmbient};
