@@ -85,7 +85,9 @@ Inverse invert_gibbs(double pressure, double value, double start, double lowest,
     const double missed = residual<kGiven>(g, tau, target);
     const double step = -missed / slope<kGiven>(g, tau);
     if (!(std::abs(missed) <= enough)) {
-      tau = clamp(tau + step, tau_low, tau_high);
+      const double next = clamp(tau + step, tau_low, tau_high);
+      if (next == tau) break;  // at a limit, and the solution lies beyond it
+      tau = next;
       continue;
     }
     const double moved = tau + step;

@@ -22,12 +22,12 @@ struct Bounds;
 template <>
 struct Bounds<Given::enthalpy> {
   static constexpr Quantity kQuantity = Quantity::enthalpy;
-  static constexpr double kLowest = -1e3;             // below h(273.15 K) of every pressure
-  static constexpr double kHighest = 8e6;             // above h(2273.15 K) of every pressure
-  static constexpr double kSaturatedLiquid = 1.68e6;  // above h' of every pressure up to p13
+  static constexpr double kLowest = -1e3;  // below h(273.15 K) of every pressure
+  static constexpr double kHighest = 8e6;  // above h(2273.15 K) of every pressure
+  static constexpr double kSaturatedLiquid =
+      1.68e6;  // above region 1 at every pressure up to 623.15 K
   static constexpr double kSaturatedVapour = 2.49e6;  // below h'' of every pressure up to p13
-  static constexpr double kRegion1 = 1.60e6;          // below h1(623.15 K) of every pressure
-  static constexpr double kRegion2 = 2.82e6;          // above h2(B23) of every pressure
+  static constexpr double kRegion2 = 2.82e6;          // above h2(B23) at every pressure
   static constexpr const char* kBelow =
       "{0} is below {1}, the enthalpy at {2} and this pressure, the lowest temperature of "
       "IAPWS-IF97";
@@ -46,7 +46,6 @@ struct Bounds<Given::entropy> {
   static constexpr double kHighest = 1e300;
   static constexpr double kSaturatedLiquid = 3.79e3;
   static constexpr double kSaturatedVapour = 5.20e3;
-  static constexpr double kRegion1 = 3.39e3;
   static constexpr double kRegion2 = 5.27e3;
   static constexpr const char* kBelow =
       "{0} is below {1}, the entropy at {2} and this pressure, the lowest temperature of "
@@ -218,7 +217,7 @@ class Isobar {
   // From 16.529 to 100 MPa: region 1, region 3 (with the two-phase region in it), regions 2 and 5.
   Outcome<Found> through_region_3() {
     const double boundary = std::max(boundary_23_temperature(pressure_), kTemperature13);
-    if (value_ > Bound::kLowest && value_ < Bound::kRegion1) {
+    if (value_ > Bound::kLowest && value_ < Bound::kSaturatedLiquid) {
       const double start = Bound::backward_1(pressure_, value_);
       if (start > kLowestTemperature + kMargin && start < kTemperature13 - kMargin) {
         const Inverse inverse = invert<Region1Equation>(start, kLowestTemperature, kTemperature13);
