@@ -2,7 +2,12 @@
 // and the two handle types.
 #pragma once
 
+#if defined(__SSE2__)
+#include <xmmintrin.h>
+#else
 #include <cfenv>
+#endif
+
 #include <new>
 #include <string_view>
 #include <utility>
@@ -27,6 +32,22 @@ inline const Row* row_of(const busbar_function* function) {
 
 /// Rounding to nearest and gradual underflow while the engine computes, whatever the host has set;
 /// the host's environment comes back afterwards.
+#if defined(__SSE2__)
+// All arithmetic here is SSE: the control register alone decides, and reading it takes 2 ns where
+// std::fegetenv, which also saves the x87 unit, takes 300.
+class FloatingPointEnvironment {
+ public:
+  FloatingPointEnvironment() : saved_(_mm_getcsr()) { _mm_setcsr(kDefault); }
+  ~FloatingPointEnvironment() { _mm_setcsr(saved_); }
+  FloatingPointEnvironment(const FloatingPointEnvironment&) = delete;
+  FloatingPointEnvironment& operator=(const FloatingPointEnvironment&) = delete;
+
+ private:
+  static constexpr unsigned kDefault =
+      0x1F80;  // all exceptions masked, to nearest, no flush to zero
+  unsigned saved_;
+};
+#else
 class FloatingPointEnvironment {
  public:
   FloatingPointEnvironment() {
@@ -40,6 +61,7 @@ class FloatingPointEnvironment {
  private:
   std::fenv_t saved_{};
 };
+#endif
 
 /// Runs the body; no exception passes. `out_of_memory` answers std::bad_alloc, `defect` the rest.
 template <class R, class Body>

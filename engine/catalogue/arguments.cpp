@@ -115,7 +115,7 @@ Trouble read_stream_cell(std::size_t index, const Cell& cell, std::optional<Stre
 Trouble read_word(std::size_t index, const Cell& cell, Slot& slot) {
   const auto* text = std::get_if<std::string>(&cell);
   if (text != nullptr && !text->empty()) {
-    slot.word = *text;
+    slot.set(text->data(), text->size());
     return {};
   }
   if (const double* number = std::get_if<double>(&cell)) {
@@ -124,6 +124,23 @@ Trouble read_word(std::size_t index, const Cell& cell, Slot& slot) {
     return trouble(Fault::wrong_kind, index, "is a number where a word is needed");
   }
   return not_a("", "is a logical where a word is needed", index, cell);
+}
+
+// Every cell of a range, read by `take(cell)`; a failure gets the place of its cell.
+template <class Take>
+Trouble read_cells(const Grid& grid, Take&& take) {
+  for (std::size_t r = 0; r < grid.rows(); ++r) {
+    for (std::size_t c = 0; c < grid.columns(); ++c) {
+      Trouble found = take(grid.at(r, c));
+      if (!found) continue;
+      if (!grid.is_single()) {
+        found.failure.row = static_cast<std::uint32_t>(r + 1);
+        found.failure.column = static_cast<std::uint32_t>(c + 1);
+      }
+      return found;
+    }
+  }
+  return {};
 }
 
 }  // namespace
@@ -153,39 +170,26 @@ Trouble read_cell(const Row& row, std::size_t index, const Cell& cell, UnitSet u
 Trouble read_range(const Row& row, std::size_t index, const Grid& grid, UnitSet units,
                    Workspace& space, Slot& slot) {
   slot.given = true;
-  const bool of_streams = row.types[index].kind == Kind::streams;
-  auto& numbers = space.numbers[index];
-  auto& streams = space.streams[index];
   const std::size_t cells = grid.rows() * grid.columns();
-  if (of_streams) {
+  if (row.types[index].kind == Kind::streams) {
+    auto& streams = space.streams.emplace_front();
     streams.reserve(cells);
-  } else {
-    numbers.reserve(cells);
+    Trouble found = read_cells(grid, [&](const Cell& cell) {
+      std::optional<Stream> stream;
+      Trouble trouble = read_stream_cell(index, cell, stream);
+      if (stream) streams.push_back(*stream);
+      return trouble;
+    });
+    slot.set(streams.data(), streams.size());
+    return found;
   }
-  for (std::size_t r = 0; r < grid.rows(); ++r) {
-    for (std::size_t c = 0; c < grid.columns(); ++c) {
-      Trouble found;
-      if (of_streams) {
-        std::optional<Stream> stream;
-        found = read_stream_cell(index, grid.at(r, c), stream);
-        if (stream) streams.push_back(*stream);
-      } else {
-        double si = 0;
-        found = read_number(row, index, grid.at(r, c), units, si);
-        numbers.push_back(si);
-      }
-      if (found) {
-        if (!grid.is_single()) {
-          found.failure.row = static_cast<std::uint32_t>(r + 1);
-          found.failure.column = static_cast<std::uint32_t>(c + 1);
-        }
-        return found;
-      }
-    }
-  }
-  slot.numbers = numbers;
-  slot.streams = streams;
-  return {};
+  auto& numbers = space.numbers.emplace_front();
+  numbers.reserve(cells);
+  Trouble found = read_cells(grid, [&](const Cell& cell) {
+    return read_number(row, index, cell, units, numbers.emplace_back());
+  });
+  slot.set(numbers.data(), numbers.size());
+  return found;
 }
 
 }  // namespace busbar

@@ -2,6 +2,7 @@
 #pragma once
 
 #include <array>
+#include <forward_list>
 #include <optional>
 #include <string>
 #include <vector>
@@ -14,8 +15,8 @@ namespace busbar {
 /// What decoded arguments point into; lives as long as the call.
 struct Workspace {
   std::array<std::optional<Stream>, kMostArguments> stream;
-  std::array<std::vector<double>, kMostArguments> numbers;
-  std::array<std::vector<Stream>, kMostArguments> streams;
+  std::forward_list<std::vector<double>> numbers;
+  std::forward_list<std::vector<Stream>> streams;
 };
 
 /// A failure and the text that was not understood, where there is one.

@@ -112,7 +112,8 @@ class Caller {
   Trouble read_constant(std::size_t index) {
     const Type& type = row_.types[index];
     if (type.kind == Kind::rest) {
-      slots_[index].rest = arguments_.subspan(std::min(index, arguments_.size()));
+      const Arguments rest = arguments_.subspan(std::min(index, arguments_.size()));
+      slots_[index].set(rest.data(), rest.size());
       return {};
     }
     const Grid* grid = given(index);
@@ -164,7 +165,7 @@ class Caller {
     Result result;
     const Failure failure = row_.thunk(slots_.data(), units_, result);
     if (failure.fault != Fault::none) return Grid(error(about(failure)));
-    return std::move(result.table);
+    return std::move(*result.table);
   }
 
   Cell compute() {
@@ -180,7 +181,7 @@ class Caller {
       case ResultKind::stream: {
         std::string text;
         text.reserve(160);
-        write_stream(text, result.stream, row_.has_options ? units_ : face_of_first_stream());
+        write_stream(text, *result.stream, row_.has_options ? units_ : face_of_first_stream());
         return text;
       }
       case ResultKind::text:
@@ -193,9 +194,10 @@ class Caller {
 
   // A function without options writes the stream as its first stream was written.
   [[nodiscard]] UnitSet face_of_first_stream() const {
-    for (const Slot& slot : slots_) {
+    for (std::size_t i = 0; i < row_.types.size(); ++i) {
+      const Slot& slot = slots_[i];
       if (slot.stream != nullptr) return slot.stream->face;
-      if (!slot.streams.empty()) return slot.streams.front().face;
+      if (row_.types[i].kind == Kind::streams && slot.size > 0) return slot.streams().front().face;
     }
     return UnitSet::metric;
   }
@@ -205,7 +207,7 @@ class Caller {
     Trouble found{failure, {}};
     const std::size_t index = failure.argument;
     if (index > 0 && index <= row_.types.size() && row_.types[index - 1].kind == Kind::word) {
-      found.word = slots_[index - 1].word;
+      found.word = slots_[index - 1].word();
     }
     return found;
   }

@@ -60,23 +60,34 @@ struct Text {
   std::string value;
 };
 
-/// One decoded argument.
+/// One decoded argument. `data` and `size` hold a word, a range of numbers, a range of streams or
+/// the further arguments, as the argument's kind says; `stream` points into the call's workspace.
 struct Slot {
   bool given = false;
   double si = 0;
   const Stream* stream = nullptr;
-  std::string_view word;
-  std::span<const double> numbers;
-  std::span<const Stream> streams;
-  Rest rest;
+  const void* data = nullptr;
+  std::size_t size = 0;
+
+  template <class T>
+  void set(const T* first, std::size_t count) {
+    data = first;
+    size = count;
+  }
+  [[nodiscard]] Word word() const { return {static_cast<const char*>(data), size}; }
+  [[nodiscard]] std::span<const double> numbers() const {
+    return {static_cast<const double*>(data), size};
+  }
+  [[nodiscard]] Streams streams() const { return {static_cast<const Stream*>(data), size}; }
+  [[nodiscard]] Rest rest() const { return {static_cast<const Grid* const*>(data), size}; }
 };
 
 /// What a thunk leaves behind; the member that the row's result kind names is filled.
 struct Result {
   double si = 0;
-  Stream stream;
+  std::optional<Stream> stream;
   Text text;
-  Grid table;
+  std::optional<Grid> table;
 };
 
 template <class T>
@@ -113,25 +124,25 @@ struct Typed<Grid> {
 template <>
 struct Typed<Word> {
   static constexpr Type type{Kind::word, Quantity::number, false};
-  static Word take(const Slot& slot) { return slot.word; }
+  static Word take(const Slot& slot) { return slot.word(); }
 };
 
 template <Quantity Q>
 struct Typed<Numbers<Of<Q>>> {
   static constexpr Type type{Kind::numbers, Q, false};
-  static Numbers<Of<Q>> take(const Slot& slot) { return {slot.numbers}; }
+  static Numbers<Of<Q>> take(const Slot& slot) { return {slot.numbers()}; }
 };
 
 template <>
 struct Typed<Streams> {
   static constexpr Type type{Kind::streams, Quantity::number, false};
-  static Streams take(const Slot& slot) { return slot.streams; }
+  static Streams take(const Slot& slot) { return slot.streams(); }
 };
 
 template <>
 struct Typed<Rest> {
   static constexpr Type type{Kind::rest, Quantity::number, true};
-  static Rest take(const Slot& slot) { return slot.rest; }
+  static Rest take(const Slot& slot) { return slot.rest(); }
 };
 
 template <>

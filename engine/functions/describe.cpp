@@ -94,7 +94,7 @@ Failure no_dryness(const water::State& state, std::uint8_t argument) {
 }
 
 void explain_result(const Slot*, const Result& result, UnitSet units, std::string& text) {
-  describe_stream(text, result.stream, units);
+  describe_stream(text, *result.stream, units);
   append_validity(text, units);
 }
 

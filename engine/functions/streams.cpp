@@ -123,9 +123,9 @@ Outcome<Stream> spray_out(const Stream& steam, const Stream& water, Temperature 
 }
 
 void explain_mix(const Slot* in, const Result& result, UnitSet units, std::string& text) {
-  double least = result.stream.pressure;
+  double least = result.stream->pressure;
   double most = least;
-  for (const Stream& stream : in[0].streams) {
+  for (const Stream& stream : in[0].streams()) {
     least = std::min(least, stream.pressure);
     most = std::max(most, stream.pressure);
   }
@@ -141,7 +141,7 @@ void explain_mix(const Slot* in, const Result& result, UnitSet units, std::strin
 
 void explain_spray(const Slot* in, const Result& result, UnitSet units, std::string& text) {
   text += " Spray flow ";
-  append_measure(text, {*result.stream.flow - *in[0].stream->flow, Quantity::flow}, units);
+  append_measure(text, {*result.stream->flow - *in[0].stream->flow, Quantity::flow}, units);
   text += '.';
   if (in[1].stream->flow) text += " The flow that the water carries is not used.";
   explain_result(in, result, units, text);

@@ -36,7 +36,8 @@ class Tag {
   std::array<char, kLimit> bytes_{};
 };
 
-/// A stream of water or steam. SI: Pa, K, J/kg, kg/s. `dryness` is NaN outside the two-phase region.
+/// A stream of water or steam. SI: Pa, K, J/kg, kg/s. `dryness` is NaN outside the two-phase
+/// region.
 struct Stream {
   Phase phase = Phase::liquid;
   double pressure = 0;

@@ -125,8 +125,18 @@ struct Face {
 };
 
 // The unit set is the one whose pressure unit stands in the face: all three differ.
+UnitSet unit_set_of(std::string_view face) {
+  for (int i = 0; i < static_cast<int>(UnitSet::count_); ++i) {
+    const auto set = static_cast<UnitSet>(i);
+    const std::string_view symbol = unit_of(set, Quantity::pressure).symbol;
+    const auto at = face.find(symbol);
+    if (at != std::string_view::npos && face.substr(at + symbol.size(), 1) == ",") return set;
+  }
+  return UnitSet::metric;
+}
+
+// Every number of a face whose fluid was read already.
 bool read_face(std::string_view text, Face& face) {
-  if (!read_fluid(text, face.phase)) return false;
   bool pressure_seen = false;
   while (!text.empty()) {
     if (face.count == face.numbers.size()) return false;
@@ -190,10 +200,11 @@ Failure explain_mismatch(const Stream& stream, const Face& face, std::string_vie
     double rounded = 0;
     if (!read_number(shown, rounded) || rounded == face.numbers[i].value) continue;
     const double edited = unit_of(face.set, quantity).to_si(face.numbers[i].value);
-    return {Fault::damaged_text,
-            1,
-            "was edited: the readable part says {0}, the exact part {1}; enter a new stream instead",
-            {{{edited, quantity}, {exact, quantity}}}};
+    return {
+        Fault::damaged_text,
+        1,
+        "was edited: the readable part says {0}, the exact part {1}; enter a new stream instead",
+        {{{edited, quantity}, {exact, quantity}}}};
   }
   return damaged("was edited: its readable part differs from its exact part");
 }
@@ -245,16 +256,21 @@ Outcome<Stream> read_stream(std::string_view text) {
     face_text.remove_prefix(colon + 2);
   }
   Face face;
-  if (!read_face(face_text, face)) {
-    return damaged("was edited or damaged: its readable part cannot be read");
+  if (!read_fluid(face_text, face.phase)) {
+    return damaged("was edited or damaged: its readable part names no fluid");
   }
   if ((face.phase == Phase::two_phase) != (stream.phase == Phase::two_phase)) {
     return damaged("was edited or damaged: only one of its two parts is wet");
   }
   stream.phase = face.phase;
-  stream.face = face.set;
-  const std::string_view body = text.substr(0, text.size() - kCheckDigits - 2);
-  if (check_digits(body) != digits) return explain_mismatch(stream, face, digits);
+  // The digits cover the face: where they fit, its numbers need not be read.
+  if (check_digits(text.substr(0, text.size() - kCheckDigits - 2)) != digits) {
+    if (!read_face(face_text, face)) {
+      return damaged("was edited or damaged: its readable part cannot be read");
+    }
+    return explain_mismatch(stream, face, digits);
+  }
+  stream.face = unit_set_of(face_text);
   if (!has_physical_numbers(stream)) {
     return damaged("was made by hand: its numbers are not those of a fluid");
   }

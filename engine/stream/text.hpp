@@ -3,11 +3,11 @@
 //   LBA10: steam 55 kg/s, 100 bar, 540 °C [1 p=1e+07 t=813.15 h=3476561.8 m=55 #k3v9qd]
 //   wet steam 0.05 bar, dryness 0.88 [1 p=5000 t=306.02 h=2270400.1 x=0.88 #8h2m0c]
 //
-// Face, for people, in the caller's unit set: tag, fluid, flow, pressure, then temperature or dryness,
-// six digits each. Tail, in brackets: format version, then SI numbers that read back exactly
-// (pressure, temperature, enthalpy, dryness where wet, mass flow where known), then check digits over
-// everything before them, the face included. One form whatever the locale. The text is the whole
-// state.
+// Face, for people, in the caller's unit set: tag, fluid, flow, pressure, then temperature or
+// dryness, six digits each. Tail, in brackets: format version, then SI numbers that read back
+// exactly (pressure, temperature, enthalpy, dryness where wet, mass flow where known), then check
+// digits over everything before them, the face included. One form whatever the locale. The text is
+// the whole state.
 #pragma once
 
 #include <string>
