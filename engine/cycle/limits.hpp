@@ -15,8 +15,8 @@ Outcome<double> carnot(double hot, double cold);
 /// never a limit. Source: F. L. Curzon and B. Ahlborn, Am. J. Phys. 43 (1975) 22, equation 11.
 Outcome<double> curzon_ahlborn(double hot, double cold);
 
-/// (h2 - h1)/(s2 - s1) in K: the entropy-mean temperature at which a stream takes heat from inlet to
-/// outlet. Impossible when the entropy does not rise. Source: Bejan, Advanced Engineering
+/// (h2 - h1)/(s2 - s1) in K: the entropy-mean temperature at which a stream takes heat from inlet
+/// to outlet. Impossible when the entropy does not rise. Source: Bejan, Advanced Engineering
 /// Thermodynamics, and Baehr and Kabelac, Thermodynamik, thermodynamic mean temperature.
 Outcome<double> mean_heating_temperature(const Stream& inlet, const Stream& outlet);
 

@@ -15,8 +15,8 @@ enum class Basis : std::uint8_t { higher, lower };
 /// name the boundary, not the heating value.
 std::optional<Basis> basis_named(std::string_view word);
 
-/// Factor from fuel energy on `from` to fuel energy on `to`, from the two heating values of the same
-/// fuel in one unit (inputs 4 and 5). Impossible when the lower one is the greater.
+/// Factor from fuel energy on `from` to fuel energy on `to`, from the two heating values of the
+/// same fuel in one unit (inputs 4 and 5). Impossible when the lower one is the greater.
 /// Definitions: ISO 1928 (gross and net calorific value at constant pressure).
 Outcome<double> energy_ratio(Basis from, Basis to, double higher, double lower);
 

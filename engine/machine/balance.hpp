@@ -15,8 +15,8 @@ Outcome<double> fluid_power(const Stream& inlet, const Stream& outlet);
 Outcome<double> heat_duty(const Stream& inlet, const Stream& outlet);
 
 /// Adiabatic mixing at the lowest of the pressures. Every stream must carry a flow, and one of them
-/// must flow. The tag stays where all tags are the same. A failing stream is named by `row`, counted
-/// along the range.
+/// must flow. The tag stays where all tags are the same. A failing stream is named by `row`,
+/// counted along the range.
 Outcome<Stream> mix_out(std::span<const Stream> streams);
 
 /// The share `fraction` of a stream, in the same state. Needs a flow.
