@@ -1,0 +1,286 @@
+// Calc's own functions inside a formula that WHY takes apart. Those that choose between their
+// arguments or take errors away are done here, because an error in the part that was not chosen
+// explains nothing; all others are computed by Calc itself.
+#include <algorithm>
+#include <array>
+#include <com/sun/star/lang/XMultiComponentFactory.hpp>
+#include <com/sun/star/sheet/XFunctionAccess.hpp>
+#include <string_view>
+#include <utility>
+
+#include "marshal.hpp"
+#include "text.hpp"
+#include "why_evaluator.hpp"
+#include "why_operators.hpp"
+
+namespace busbar::addin {
+namespace {
+
+using com::sun::star::sheet::XFunctionAccess;
+using com::sun::star::uno::Any;
+using com::sun::star::uno::Reference;
+using com::sun::star::uno::Sequence;
+using com::sun::star::uno::UNO_QUERY_THROW;
+using com::sun::star::uno::XComponentContext;
+
+// The answer depends on the place of the cell, on chance, on the clock, on other documents or on
+// the network: to compute it again would give another answer or have an effect.
+constexpr std::array<std::string_view, 33> kNotRepeatable{"AREAS",
+                                                          "CELL",
+                                                          "COLUMN",
+                                                          "CURRENT",
+                                                          "DDE",
+                                                          "FILTERXML",
+                                                          "FORMULA",
+                                                          "GETPIVOTDATA",
+                                                          "GOALSEEK",
+                                                          "HYPERLINK",
+                                                          "INDIRECT",
+                                                          "INFO",
+                                                          "ISFORMULA",
+                                                          "ISREF",
+                                                          "MULTIRANGE",
+                                                          "NOW",
+                                                          "OFFSET",
+                                                          "RAND",
+                                                          "RAND.NV",
+                                                          "RANDBETWEEN",
+                                                          "RANDBETWEEN.NV",
+                                                          "ROW",
+                                                          "SHEET",
+                                                          "SHEETS",
+                                                          "STYLE",
+                                                          "SUBTOTAL",
+                                                          "TABLE",
+                                                          "TODAY",
+                                                          "WEBSERVICE",
+                                                          "ZGZ",
+                                                          "MULTIPLE.OPERATIONS",
+                                                          "EXTERNAL",
+                                                          "MACRO"};
+
+// Functions that may work although a cell of their range holds an error.
+constexpr std::array<std::string_view, 24> kTolerant{
+    "AGGREGATE", "AVERAGEIF", "AVERAGEIFS", "COLUMNS", "COUNT", "COUNTA", "COUNTBLANK", "COUNTIF",
+    "COUNTIFS",  "HLOOKUP",   "INDEX",      "LOOKUP",  "MATCH", "MAXIFS", "MINIFS",     "ROWS",
+    "SUMIF",     "SUMIFS",    "VLOOKUP",    "TYPE",    "N",     "T",      "CHOOSE",     "SMALL"};
+
+// Tests that take any error and answer.
+constexpr std::array<std::string_view, 8> kTests{"ISERROR", "ISERR",     "ISNA",      "ISNUMBER",
+                                                 "ISTEXT",  "ISNONTEXT", "ISLOGICAL", "ISBLANK"};
+
+template <std::size_t N>
+bool contains(const std::array<std::string_view, N>& list, std::string_view word) {
+  return std::find(list.begin(), list.end(), word) != list.end();
+}
+
+Result unknown(std::string why) {
+  Result result;
+  result.unknown = std::move(why);
+  return result;
+}
+
+Result of_value(Any value) {
+  Result result;
+  result.value = std::move(value);
+  return result;
+}
+
+Result of_fault(Fault fault) {
+  Result result;
+  result.value = to_calc(fault.error);
+  result.fault = std::move(fault);
+  return result;
+}
+
+Result calc_fault(CalcError error, std::string text) {
+  Fault fault;
+  fault.error = error;
+  fault.text = std::move(text);
+  return of_fault(std::move(fault));
+}
+
+const Node& missing() {
+  static const Node* const node = [] {
+    auto* fresh = new Node;
+    fresh->kind = NodeKind::missing;
+    return fresh;
+  }();
+  return *node;
+}
+
+const Node& child(const Node& node, std::size_t index) {
+  return index < node.children.size() ? node.children[index] : missing();
+}
+
+}  // namespace
+
+Result Evaluator::compute_builtin(const Node& node, Want want) {
+  const std::string_view word = node.word;
+  if (word == "IF" || word == "CHOOSE") return choose(node, want);
+  if (word == "IFS") return condition_list(node, want);
+  if (word == "SWITCH") return switch_list(node, want);
+  if (word == "IFERROR" || word == "IFNA") return after_failure(node, want);
+  if (word == "INDEX") return index_into(node, want);
+  if (contains(kTests, word)) return test_for_error(node, want);
+  if (contains(kNotRepeatable, word) || word.empty())
+    return unknown("uses " + (word.empty() ? std::string("a function") : node.word) +
+                   ", which WHY does not compute again");
+  return through_calc(node, want);
+}
+
+// A condition: one value, not a table.
+Result Evaluator::truth(const Node& node, Want want, bool& holds) {
+  Result condition = operand(node, want);
+  if (!condition.usable()) return condition;
+  const Shape shape = shape_of(condition.value);
+  if (shape.rows != 1 || shape.columns != 1)
+    return unknown("decides row by row inside another function");
+  const double number = as_number(element_of(condition.value, 0, 0));
+  if (error_in(number) != CalcError::none)
+    return calc_fault(CalcError::value, "a condition that is neither true nor false");
+  holds = number != 0;
+  return condition;
+}
+
+Result Evaluator::choose(const Node& node, Want want) {
+  if (node.word == "IF") {
+    bool holds = false;
+    Result condition = truth(child(node, 0), want, holds);
+    if (!condition.usable()) return condition;
+    if (!holds && node.children.size() < 3) return of_value(Any(0.0));
+    return compute(child(node, holds ? 1 : 2), want);
+  }
+  Result position = operand(child(node, 0), want);
+  if (!position.usable()) return position;
+  const double number = as_number(element_of(position.value, 0, 0));
+  if (!(number >= 1) || number >= static_cast<double>(node.children.size()))
+    return calc_fault(CalcError::argument, "CHOOSE with a position that it does not have");
+  return compute(child(node, static_cast<std::size_t>(number)), want);
+}
+
+Result Evaluator::condition_list(const Node& node, Want want) {
+  for (std::size_t i = 0; i + 1 < node.children.size(); i += 2) {
+    bool holds = false;
+    Result condition = truth(node.children[i], want, holds);
+    if (!condition.usable()) return condition;
+    if (holds) return compute(node.children[i + 1], want);
+  }
+  return calc_fault(CalcError::not_available, "IFS without a condition that holds");
+}
+
+Result Evaluator::switch_list(const Node& node, Want want) {
+  const Result subject = operand(child(node, 0), want);
+  if (!subject.usable()) return subject;
+  std::size_t i = 1;
+  for (; i + 1 < node.children.size(); i += 2) {
+    const Result candidate = operand(node.children[i], want);
+    if (!candidate.usable()) return candidate;
+    const Any same = apply(Operator::equal, subject.value, candidate.value);
+    if (as_number(element_of(same, 0, 0)) != 0) return compute(node.children[i + 1], want);
+  }
+  if (i < node.children.size()) return compute(node.children[i], want);
+  return calc_fault(CalcError::not_available, "SWITCH without a case that fits");
+}
+
+Result Evaluator::after_failure(const Node& node, Want want) {
+  Result first = compute(child(node, 0), want);
+  if (!first.fault) return first;
+  if (node.word == "IFNA" && first.fault->error != CalcError::not_available) return first;
+  if (!hidden_) hidden_ = first.fault;
+  return compute(child(node, 1), want);
+}
+
+Result Evaluator::test_for_error(const Node& node, Want want) {
+  Result tested = operand(child(node, 0), want);
+  if (!tested.unknown.empty()) return tested;
+  const std::string_view word = node.word;
+  if (!tested.fault) {
+    if (word == "ISERROR" || word == "ISERR" || word == "ISNA") return of_value(Any(0.0));
+    return through_calc(node, want);
+  }
+  if (!hidden_) hidden_ = tested.fault;
+  const bool missing_value = tested.fault->error == CalcError::not_available;
+  const bool holds = word == "ISERROR" || word == "ISNONTEXT" ||
+                     (word == "ISNA" && missing_value) || (word == "ISERR" && !missing_value);
+  return of_value(Any(holds ? 1.0 : 0.0));
+}
+
+// INDEX of a reference leads to one cell, whatever the others hold.
+Result Evaluator::index_into(const Node& node, Want want) {
+  const auto area = area_behind(child(node, 0));
+  if (!area || node.children.size() > 3) return through_calc(node, want);
+  std::array<double, 2> position{0, 0};
+  for (std::size_t i = 0; i < position.size(); ++i) {
+    Result given = operand(child(node, i + 1), want);
+    if (!given.usable()) return given;
+    if (given.value.hasValue()) position[i] = as_number(element_of(given.value, 0, 0));
+  }
+  // A single row or column may be counted along by one position.
+  if (area->rows() == 1 && node.children.size() == 2) std::swap(position[0], position[1]);
+  if (area->rows() == 1 && position[0] == 0) position[0] = 1;
+  if (area->columns() == 1 && position[1] == 0) position[1] = 1;
+  if (!(position[0] >= 0) || !(position[1] >= 0) ||
+      position[0] >= static_cast<double>(area->rows()) + 1 ||
+      position[1] >= static_cast<double>(area->columns()) + 1)
+    return calc_fault(CalcError::argument, "INDEX beyond the end of its range");
+  Area part = *area;
+  if (position[0] >= 1) {
+    part.first.row += static_cast<sal_Int32>(position[0]) - 1;
+    part.last_row = part.first.row;
+  }
+  if (position[1] >= 1) {
+    part.first.column += static_cast<sal_Int32>(position[1]) - 1;
+    part.last_column = part.first.column;
+  }
+  return compute_reference(part, want);
+}
+
+Result Evaluator::through_calc(const Node& node, Want want) {
+  if (budget_.calls == 0) return unknown("makes more calls than WHY repeats");
+  --budget_.calls;
+  const bool tolerant = contains(kTolerant, node.word);
+  Sequence<Any> arguments(static_cast<sal_Int32>(node.children.size()));
+  Any* const argument = arguments.getArray();
+  std::optional<Fault> in_range;
+  for (std::size_t i = 0; i < node.children.size(); ++i) {
+    const auto area = area_behind(node.children[i]);
+    if (area && !area->single() && !in_range) {
+      if (const auto failing = document_.first_error(*area)) {
+        in_range.emplace();
+        in_range->origin = Fault::Origin::cell;
+        in_range->error = document_.error(*failing);
+        in_range->cell = *failing;
+        in_range->in_range = true;
+        if (!tolerant) return of_fault(*in_range);
+      }
+    }
+    Result given = compute(node.children[i], Want::whole);
+    if (!given.usable()) return given;
+    if (!given.value.hasValue() && i + 1 != node.children.size())
+      return unknown("leaves out an argument of " + node.word);
+    argument[i] = given.value;
+  }
+  if (!node.children.empty() && !argument[arguments.getLength() - 1].hasValue())
+    arguments.realloc(arguments.getLength() - 1);
+  const auto failed = [&](CalcError error) {
+    if (in_range) return of_fault(*in_range);
+    if (latent_) return of_fault(*latent_);
+    return calc_fault(error, node.word + ", one of Calc's own functions");
+  };
+  try {
+    const Reference<XFunctionAccess> access(
+        context_->getServiceManager()->createInstanceWithContext(
+            "com.sun.star.sheet.FunctionAccess", context_),
+        UNO_QUERY_THROW);
+    const Any value = access->callFunction(to_utf16(node.word), arguments);
+    if (!value.hasValue()) return failed(CalcError::not_available);
+    const CalcError error = error_in(value);
+    if (error != CalcError::none) return failed(error);
+    return want == Want::element ? pick(value) : of_value(value);
+  } catch (const com::sun::star::uno::Exception&) {
+    return failed(CalcError::value);
+  }
+}
+
+}  // namespace busbar::addin

@@ -1,0 +1,383 @@
+#include "why_evaluator.hpp"
+
+#include <algorithm>
+#include <utility>
+
+#include "marshal.hpp"
+#include "text.hpp"
+#include "why_operators.hpp"
+
+namespace busbar::addin {
+namespace {
+
+using com::sun::star::uno::Any;
+
+constexpr int kMostNames = 16;  // names that stand for names
+constexpr std::size_t kMostExplanations = 3;
+constexpr std::size_t kMostBlanksNamed = 4;
+
+Result unknown(std::string why) {
+  Result result;
+  result.unknown = std::move(why);
+  return result;
+}
+
+Result of_value(Any value) {
+  Result result;
+  result.value = std::move(value);
+  return result;
+}
+
+Result of_fault(Fault fault) {
+  Result result;
+  result.value = to_calc(fault.error);
+  result.fault = std::move(fault);
+  return result;
+}
+
+Result calc_fault(CalcError error, std::string text) {
+  Fault fault;
+  fault.origin = Fault::Origin::calc;
+  fault.error = error;
+  fault.text = std::move(text);
+  return of_fault(std::move(fault));
+}
+
+const char* words_for(CalcError error) {
+  switch (error) {
+    case CalcError::division:
+      return "a division by zero";
+    case CalcError::number:
+      return "an arithmetic result that is no finite number";
+    case CalcError::value:
+      return "an operator that was given a text instead of a number";
+    case CalcError::not_available:
+      return "a cell of the array formula beyond the end of its operands";
+    default:
+      return "an operator that fails";
+  }
+}
+
+// Arguments that are lifted over a range take one element a result; the others take it whole.
+bool is_lifted(std::int32_t kind) {
+  return kind != BUSBAR_ARGUMENT_NUMBERS && kind != BUSBAR_ARGUMENT_STREAMS &&
+         kind != BUSBAR_ARGUMENT_CELL;
+}
+
+std::int32_t kind_of_argument(const busbar_function* function, std::size_t index) {
+  const std::size_t count = busbar_argument_count(function);
+  if (count == 0) return BUSBAR_ARGUMENT_NUMBER;
+  return busbar_argument_kind(function, std::min(index, count - 1));
+}
+
+std::string name_of_argument(const busbar_function* function, std::size_t index) {
+  if (index >= busbar_argument_count(function)) return "argument " + std::to_string(index + 1);
+  return busbar_argument_text(function, index, BUSBAR_ARGUMENT_NAME);
+}
+
+}  // namespace
+
+Result Evaluator::compute(const Node& node, Want want) {
+  if (budget_.nodes == 0) return unknown("is too long to be taken apart");
+  --budget_.nodes;
+  switch (node.kind) {
+    case NodeKind::literal: {
+      const CalcError error = error_in(node.value);
+      if (error != CalcError::none) return calc_fault(error, "an error that was typed in");
+      return want == Want::element ? pick(node.value) : of_value(node.value);
+    }
+    case NodeKind::missing:
+      return of_value({});
+    case NodeKind::reference:
+      return compute_reference(node.area, want);
+    case NodeKind::name:
+      return compute_named(node, want);
+    case NodeKind::negative:
+      return compute_scaled(node, want, -1.0);
+    case NodeKind::percent:
+      return compute_scaled(node, want, 0.01);
+    case NodeKind::binary:
+      return compute_binary(node, want);
+    case NodeKind::busbar_call:
+      return compute_engine_call(node, want);
+    case NodeKind::builtin_call:
+      return compute_builtin(node, want);
+    default:
+      return unknown(node.word);
+  }
+}
+
+// The element of a table that the cell shows.
+Result Evaluator::pick(const Any& value) {
+  const Any single = element_of(value, static_cast<std::size_t>(formula_.row),
+                                static_cast<std::size_t>(formula_.column));
+  if (!single.hasValue() && value.hasValue()) {
+    const Shape shape = shape_of(value);
+    return calc_fault(CalcError::not_available,
+                      "the array formula covers more cells than its result, which has " +
+                          std::to_string(shape.rows) + " x " + std::to_string(shape.columns) +
+                          " cells");
+  }
+  const CalcError error = error_in(single);
+  if (error == CalcError::none) return of_value(single);
+  if (latent_) return of_fault(*latent_);
+  return calc_fault(error, words_for(error));
+}
+
+Result Evaluator::single_cell(const Address& address) {
+  if (!document_.exists(address)) return unknown("refers to a cell that does not exist");
+  if (document_.content(address) == Content::blank) {
+    blanks_.push_back(address);
+    return of_value(Any(0.0));
+  }
+  const CalcError error = document_.error(address);
+  if (error != CalcError::none) {
+    Fault fault;
+    fault.origin = Fault::Origin::cell;
+    fault.error = error;
+    fault.cell = address;
+    return of_fault(std::move(fault));
+  }
+  return of_value(document_.value(address));
+}
+
+Result Evaluator::compute_reference(const Area& area, Want want) {
+  if (area.single()) return single_cell(area.first);
+  if (want == Want::element) {
+    Address place = area.first;
+    if (area.rows() > 1) place.row += formula_.row;
+    if (area.columns() > 1) place.column += formula_.column;
+    if (place.row > area.last_row || place.column > area.last_column)
+      return calc_fault(CalcError::not_available, words_for(CalcError::not_available));
+    return single_cell(place);
+  }
+  if (!document_.exists(area.first)) return unknown("refers to a cell that does not exist");
+  const std::size_t cells = area.rows() * area.columns();
+  if (cells > budget_.cells || cells > busbar_cell_limit())
+    return unknown("refers to a range that is too large to be read again");
+  budget_.cells -= cells;
+  return of_value(document_.table(area));
+}
+
+std::optional<Node> Evaluator::parsed_name(const Node& node) {
+  const auto tokens = document_.name_tokens(node.name);
+  if (!tokens) return {};
+  return parse_formula(*tokens, formula_.base, token_numbers(document_));
+}
+
+Result Evaluator::compute_named(const Node& node, Want want) {
+  if (names_open_ >= kMostNames) return unknown("uses names that stand for names without end");
+  const auto parsed = parsed_name(node);
+  if (!parsed) return unknown("uses a name that is not defined");
+  ++names_open_;
+  Result result = compute(*parsed, want);
+  --names_open_;
+  return result;
+}
+
+std::optional<Area> Evaluator::area_behind(const Node& node) {
+  if (node.kind == NodeKind::reference) return node.area;
+  if (node.kind != NodeKind::name || names_open_ >= kMostNames) return {};
+  const auto parsed = parsed_name(node);
+  if (!parsed) return {};
+  ++names_open_;
+  auto area = area_behind(*parsed);
+  --names_open_;
+  return area;
+}
+
+std::optional<Area> Evaluator::intersection(const Area& area) const {
+  Area single = area;
+  if (area.rows() > 1) {
+    if (area.columns() > 1 || cell_.row < area.first.row || cell_.row > area.last_row) return {};
+    single.first.row = cell_.row;
+  }
+  if (area.columns() > 1) {
+    if (cell_.column < area.first.column || cell_.column > area.last_column) return {};
+    single.first.column = cell_.column;
+  }
+  single.last_row = single.first.row;
+  single.last_column = single.first.column;
+  return single;
+}
+
+Result Evaluator::operand(const Node& node, Want want) {
+  if (!formula_.array) {
+    const auto area = area_behind(node);
+    if (area && !area->single()) {
+      const auto single = intersection(*area);
+      if (!single)
+        return calc_fault(CalcError::value,
+                          "a range of several cells where one value is needed, and no cell of it "
+                          "stands in the same row or column");
+      return single_cell(single->first);
+    }
+  } else if (want == Want::whole) {
+    const auto area = area_behind(node);
+    if (area && !area->single()) {
+      if (const auto failing = document_.first_error(*area)) {
+        Fault fault;
+        fault.origin = Fault::Origin::cell;
+        fault.error = document_.error(*failing);
+        fault.cell = *failing;
+        fault.in_range = true;
+        if (!latent_) latent_ = fault;
+      }
+    }
+  }
+  return compute(node, want);
+}
+
+Result Evaluator::compute_scaled(const Node& node, Want want, double factor) {
+  Result inner = operand(node.children.front(), want);
+  if (!inner.usable()) return inner;
+  Any value = scaled(inner.value, factor);
+  const CalcError error = error_in(value);
+  if (error != CalcError::none) return calc_fault(error, words_for(error));
+  return of_value(std::move(value));
+}
+
+Result Evaluator::compute_binary(const Node& node, Want want) {
+  Result left = operand(node.children[0], want);
+  if (left.fault) return left;
+  Result right = operand(node.children[1], want);
+  if (right.fault) return right;
+  if (!left.usable()) return left;
+  if (!right.usable()) return right;
+  Any value = apply(node.op, left.value, right.value);
+  const CalcError error = error_in(value);
+  if (error != CalcError::none) return calc_fault(error, words_for(error));
+  return of_value(std::move(value));
+}
+
+std::string Evaluator::blank_note(std::size_t from) const {
+  std::vector<Address> named;
+  for (std::size_t i = from; i < blanks_.size() && named.size() < kMostBlanksNamed; ++i)
+    if (std::find(named.begin(), named.end(), blanks_[i]) == named.end())
+      named.push_back(blanks_[i]);
+  if (named.empty()) return {};
+  std::string text = " ";
+  for (std::size_t i = 0; i < named.size(); ++i) {
+    if (i != 0) text += i + 1 == named.size() ? " and " : ", ";
+    text += document_.name_of(named[i], cell_.sheet);
+  }
+  return text + (named.size() == 1 ? " is" : " are") + " blank, which Calc hands over as 0.";
+}
+
+std::string Evaluator::explain(const Node& node,
+                               const std::vector<const busbar_value*>& arguments) {
+  busbar_value* raw = nullptr;
+  const std::int32_t status =
+      busbar_explain(node.function, arguments.data(), arguments.size(), &raw);
+  const Value explanation(raw);
+  if (status != BUSBAR_OK || !explanation) return "the engine could not explain " + node.word + ".";
+  std::size_t length = 0;
+  const char* text = busbar_get_text(explanation.get(), 0, 0, &length);
+  if (text == nullptr) return "the engine could not explain " + node.word + ".";
+  return {text, length};
+}
+
+Result Evaluator::failed_call(const Node& node, const std::vector<const busbar_value*>& arguments,
+                              CalcError error) {
+  Fault fault;
+  fault.origin = Fault::Origin::engine;
+  fault.error = error;
+  fault.text = explain(node, arguments);
+  return of_fault(std::move(fault));
+}
+
+Result Evaluator::compute_engine_call(const Node& node, Want want) {
+  if (busbar_argument_count(node.function) == 1 &&
+      busbar_argument_kind(node.function, 0) == BUSBAR_ARGUMENT_CELL)
+    return unknown("asks " + node.word + " about another cell");
+  if (budget_.calls == 0) return unknown("makes more calls than WHY repeats");
+  --budget_.calls;
+
+  const std::size_t blanks_before = blanks_.size();
+  ++engine_calls_open_;
+  std::vector<Value> values(node.children.size());
+  std::vector<const busbar_value*> arguments(node.children.size());
+  Result stopped;
+  for (std::size_t i = 0; i < values.size() && stopped.usable(); ++i) {
+    const Node& child = node.children[i];
+    const auto area = area_behind(child);
+    if (area && !area->single()) {
+      // Calc calls no add-in with a range that holds an error.
+      if (const auto failing = document_.first_error(*area)) {
+        Fault fault;
+        fault.origin = Fault::Origin::cell;
+        fault.error = CalcError::parameter_list;
+        fault.cell = *failing;
+        fault.in_range = true;
+        stopped = of_fault(std::move(fault));
+        break;
+      }
+    }
+    Result argument = compute(child, Want::whole);
+    if (!argument.usable()) {
+      stopped = std::move(argument);
+      break;
+    }
+    Any value = argument.value;
+    if (want == Want::element && value.hasValue() &&
+        is_lifted(kind_of_argument(node.function, i))) {
+      Result single = pick(value);
+      if (!single.usable()) {
+        stopped = std::move(single);
+        break;
+      }
+      value = single.value;
+      // What stood blank in a range is a missing value, not an empty text.
+      rtl::OUString text;
+      if (area && !area->single() && (value >>= text) && text.isEmpty()) {
+        values[i].reset(busbar_value_create(1, 1));
+        arguments[i] = values[i].get();
+        continue;
+      }
+    }
+    const Taken taken = to_engine(value, values[i]);
+    if (taken != Taken::value && taken != Taken::omitted) {
+      Fault fault;
+      fault.origin = Fault::Origin::engine;
+      fault.text = "the " + name_of_argument(node.function, i) + " of " + node.word + " " +
+                   in_words(taken) + ".";
+      stopped = of_fault(std::move(fault));
+    }
+    arguments[i] = values[i].get();
+  }
+  --engine_calls_open_;
+  if (!stopped.usable()) return stopped;
+
+  busbar_value* raw = nullptr;
+  const std::int32_t status = busbar_call(node.function, arguments.data(), arguments.size(), &raw);
+  const Value answer(raw);
+  if (status != BUSBAR_OK || !answer) {
+    Fault fault;
+    fault.origin = Fault::Origin::engine;
+    fault.text = "the engine had no memory for " + node.word + ".";
+    return of_fault(std::move(fault));
+  }
+  const std::string note = blank_note(blanks_before);
+  const Any value = to_calc(*answer);
+  const CalcError error = error_in(value);
+  if (error != CalcError::none) {
+    Result failed = failed_call(node, arguments, error);
+    failed.fault->text += note;
+    return failed;
+  }
+  const Shape shape = shape_of(value);
+  if (shape.rows != 1 || shape.columns != 1) {
+    // An error inside the table: it counts only where it comes out in the end.
+    for (std::size_t r = 0; r < shape.rows && !latent_; ++r)
+      for (std::size_t c = 0; c < shape.columns && !latent_; ++c)
+        if (busbar_kind(answer.get(), r, c) == BUSBAR_ERROR)
+          latent_ =
+              failed_call(node, arguments, calc_error_of(busbar_get_error(answer.get(), r, c)))
+                  .fault;
+  }
+  if (engine_calls_open_ == 0 && explanations_.size() < kMostExplanations)
+    explanations_.push_back(explain(node, arguments) + note);
+  return want == Want::element ? pick(value) : of_value(value);
+}
+
+}  // namespace busbar::addin
