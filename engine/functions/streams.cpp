@@ -227,7 +227,7 @@ constexpr Row kRows[] = {
                      kStateNote,
                      "Density",
                      kSteamTables,
-                     {"DENSITY_OF(STEAM(30; 26.85))", "997.85295"},
+                     {"DENSITY_OF(STEAM(30; 26.85))", "997.85294"},
                      kFirst},
                     kStream, explain_first),
     row<flow_of>({"FLOW_OF",
@@ -305,7 +305,8 @@ constexpr Row kRows[] = {
          "FLOW_OF(outlet) - FLOW_OF(steam). For appraisal only, never to set a control.",
          kStreamResult,
          kBalance,
-         {"SPRAY_OUT(STEAM(100; 560; 50); STEAM(130; 160); 540)", "steam 50."},
+         {"SPRAY_OUT(STEAM(100; 560; 50); STEAM(130; 160); 540)",
+          "steam 50.8953 kg/s, 100 bar, 540 °C"},
          kFirst},
         kSpray, explain_spray),
 };

@@ -72,7 +72,7 @@ constexpr Row kRows[] = {
                        kUnitNote,
                        "A number",
                        kUnits,
-                       {"CONVERT_UNIT(1450; \"psia\"; \"bar\")", "99.9739806"},
+                       {"CONVERT_UNIT(1450; \"psia\"; \"bar\")", "99.9739808"},
                        kFirst},
                       kConversion),
     row<convert_difference>(
