@@ -61,6 +61,9 @@ struct Bounds<Given::entropy> {
 // Distance (K) from a boundary within which the boundary is evaluated instead of trusting a start.
 constexpr double kMargin = 0.1;
 
+// The same for a solution: nearer to a boundary than this (K), rounding could decide.
+constexpr double kCertain = 1e-6;
+
 Failure no_convergence() {
   return make_failure(Fault::no_convergence, 0, "the iteration of IAPWS-IF97 did not converge");
 }
@@ -193,8 +196,8 @@ class Isobar {
       const double start = Bound::backward_1(pressure_, value_);
       if (start > kLowestTemperature + kMargin && start < saturation - kMargin) {
         const Inverse inverse = invert<Region1Equation>(start, kLowestTemperature, saturation);
-        if (inverse.converged && inverse.temperature >= kLowestTemperature &&
-            inverse.temperature < saturation) {
+        if (inverse.converged && inverse.temperature >= kLowestTemperature + kCertain &&
+            inverse.temperature < saturation - kCertain) {
           return answer(Region::liquid, inverse, kLowestTemperature, saturation);
         }
       }
@@ -202,8 +205,8 @@ class Isobar {
       const double start = Bound::backward_2(pressure_, value_);
       if (start > saturation + kMargin && start < kHighestTemperature2 - kMargin) {
         const Inverse inverse = invert<Region2Equation>(start, saturation, kHighestTemperature2);
-        if (inverse.converged && inverse.temperature > saturation &&
-            inverse.temperature <= kHighestTemperature2) {
+        if (inverse.converged && inverse.temperature > saturation + kCertain &&
+            inverse.temperature <= kHighestTemperature2 - kCertain) {
           return answer(Region::vapour, inverse, saturation, kHighestTemperature2);
         }
       }
@@ -221,8 +224,8 @@ class Isobar {
       const double start = Bound::backward_1(pressure_, value_);
       if (start > kLowestTemperature + kMargin && start < kTemperature13 - kMargin) {
         const Inverse inverse = invert<Region1Equation>(start, kLowestTemperature, kTemperature13);
-        if (inverse.converged && inverse.temperature >= kLowestTemperature &&
-            inverse.temperature <= kTemperature13) {
+        if (inverse.converged && inverse.temperature >= kLowestTemperature + kCertain &&
+            inverse.temperature <= kTemperature13 - kCertain) {
           return answer(Region::liquid, inverse, kLowestTemperature, kTemperature13);
         }
       }
@@ -230,8 +233,8 @@ class Isobar {
       const double start = Bound::backward_2(pressure_, value_);
       if (start > boundary + kMargin && start < kHighestTemperature2 - kMargin) {
         const Inverse inverse = invert<Region2Equation>(start, boundary, kHighestTemperature2);
-        if (inverse.converged && inverse.temperature >= boundary &&
-            inverse.temperature <= kHighestTemperature2) {
+        if (inverse.converged && inverse.temperature >= boundary + kCertain &&
+            inverse.temperature <= kHighestTemperature2 - kCertain) {
           return answer(Region::vapour, inverse, boundary, kHighestTemperature2);
         }
       }

@@ -15,11 +15,15 @@ struct Properties {
   double entropy = 0;
 };
 
-/// `from` at weight 0, `to` at weight 1, linear in between.
+/// `from` at weight 0, `to` at weight 1, both to the last bit, and linear in between.
+inline double mixed(double from, double to, double weight) {
+  const double width = to - from;
+  return weight < 0.5 ? from + weight * width : to - (1 - weight) * width;
+}
+
 inline Properties mixed(const Properties& from, const Properties& to, double weight) {
-  return {from.volume + weight * (to.volume - from.volume),
-          from.enthalpy + weight * (to.enthalpy - from.enthalpy),
-          from.entropy + weight * (to.entropy - from.entropy)};
+  return {mixed(from.volume, to.volume, weight), mixed(from.enthalpy, to.enthalpy, weight),
+          mixed(from.entropy, to.entropy, weight)};
 }
 
 /// Properties at pressure (Pa) and temperature (K) by the equation of region 1, 2 or 5.
