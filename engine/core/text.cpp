@@ -63,7 +63,8 @@ void append_number(std::string& out, double value, int significant) {
   // processor writes the same digits, and five times as fast as std::to_chars with a precision.
   int decimals = significant - 1;
   for (std::size_t power = 1; size >= kPowers[power]; ++power) --decimals;
-  for (double s = size; s < 1; s *= 10) ++decimals;
+  // The least plain number is 1e-4.
+  for (std::size_t power = 1; power <= 4 && size * kPowers[power - 1] < 1; ++power) ++decimals;
   decimals = std::clamp(decimals, 0, kMostDecimals);
   const double scaled = std::floor(size * kPowers[static_cast<std::size_t>(decimals)] + 0.5);
   auto digits = static_cast<std::uint64_t>(scaled);

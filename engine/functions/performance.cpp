@@ -6,8 +6,6 @@
 namespace busbar::functions {
 namespace {
 
-using fuel::Basis;
-
 Outcome<HeatRate> heat_rate(Fraction efficiency) { return HeatRate{1 / efficiency.si}; }
 
 Outcome<Fraction> efficiency_from_heat_rate(HeatRate rate) {

@@ -65,8 +65,7 @@ class Reader {
       const bool sign = take("*") || take("·") || take(".");
       skip_spaces();
       if (left_.empty() || left_.front() == '/' || left_.front() == ')') {
-        if (sign) return false;
-        return true;
+        return !sign;
       }
       if (!sign && left_.size() == before.size()) return true;
       Expression next;
@@ -150,8 +149,7 @@ class Reader {
     }
     // In "kJ/(kg °C)" the degree is a difference, which the trade writes so; the zero point drops out.
     unit.offset = 0;
-    if (unit.reference == Reference::gauge || other.reference == Reference::gauge) return false;
-    return true;
+    return unit.reference != Reference::gauge && other.reference != Reference::gauge;
   }
 
   std::string_view left_;
