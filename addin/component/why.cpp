@@ -213,6 +213,11 @@ class Investigation {
       step.next = tree.area.first;
       return step;
     }
+    if (tree.kind == NodeKind::busbar_call && busbar_argument_count(tree.function) == 1 &&
+        busbar_argument_kind(tree.function, 0) == BUSBAR_ARGUMENT_CELL) {
+      step.text = "the cell holds the answer of " + tree.word + " about another cell.";
+      return step;
+    }
     for (const std::string& text : evaluator.explanations()) {
       if (!step.text.empty()) step.text += ' ';
       step.text += text;

@@ -25,53 +25,26 @@ using com::sun::star::uno::XComponentContext;
 
 // The answer depends on the place of the cell, on chance, on the clock, on other documents or on
 // the network: to compute it again would give another answer or have an effect.
-constexpr std::array<std::string_view, 33> kNotRepeatable{"AREAS",
-                                                          "CELL",
-                                                          "COLUMN",
-                                                          "CURRENT",
-                                                          "DDE",
-                                                          "FILTERXML",
-                                                          "FORMULA",
-                                                          "GETPIVOTDATA",
-                                                          "GOALSEEK",
-                                                          "HYPERLINK",
-                                                          "INDIRECT",
-                                                          "INFO",
-                                                          "ISFORMULA",
-                                                          "ISREF",
-                                                          "MULTIRANGE",
-                                                          "NOW",
-                                                          "OFFSET",
-                                                          "RAND",
-                                                          "RAND.NV",
-                                                          "RANDBETWEEN",
-                                                          "RANDBETWEEN.NV",
-                                                          "ROW",
-                                                          "SHEET",
-                                                          "SHEETS",
-                                                          "STYLE",
-                                                          "SUBTOTAL",
-                                                          "TABLE",
-                                                          "TODAY",
-                                                          "WEBSERVICE",
-                                                          "ZGZ",
-                                                          "MULTIPLE.OPERATIONS",
-                                                          "EXTERNAL",
-                                                          "MACRO"};
+constexpr std::string_view kNotRepeatable =
+    " AREAS CELL CURRENT DDE FILTERXML FORMULA GETPIVOTDATA GOALSEEK HYPERLINK INDIRECT "
+    "INFO ISFORMULA ISREF MULTIRANGE NOW OFFSET RAND RAND.NV RANDBETWEEN RANDBETWEEN.NV "
+    "SHEET SHEETS STYLE SUBTOTAL TABLE TODAY WEBSERVICE ZGZ ";
 
 // Functions that may work although a cell of their range holds an error.
-constexpr std::array<std::string_view, 24> kTolerant{
-    "AGGREGATE", "AVERAGEIF", "AVERAGEIFS", "COLUMNS", "COUNT", "COUNTA", "COUNTBLANK", "COUNTIF",
-    "COUNTIFS",  "HLOOKUP",   "INDEX",      "LOOKUP",  "MATCH", "MAXIFS", "MINIFS",     "ROWS",
-    "SUMIF",     "SUMIFS",    "VLOOKUP",    "TYPE",    "N",     "T",      "CHOOSE",     "SMALL"};
+constexpr std::string_view kTolerant =
+    " AGGREGATE AVERAGEIF AVERAGEIFS COLUMNS COUNT COUNTA COUNTBLANK COUNTIF COUNTIFS "
+    "HLOOKUP INDEX LOOKUP MATCH MAXIFS MINIFS N ROWS SMALL SUMIF SUMIFS T TYPE VLOOKUP ";
 
 // Tests that take any error and answer.
-constexpr std::array<std::string_view, 8> kTests{"ISERROR", "ISERR",     "ISNA",      "ISNUMBER",
-                                                 "ISTEXT",  "ISNONTEXT", "ISLOGICAL", "ISBLANK"};
+constexpr std::string_view kTests =
+    " ISBLANK ISERR ISERROR ISLOGICAL ISNA ISNONTEXT ISNUMBER ISTEXT ";
 
-template <std::size_t N>
-bool contains(const std::array<std::string_view, N>& list, std::string_view word) {
-  return std::find(list.begin(), list.end(), word) != list.end();
+// The lists hold a blank before and after each word.
+bool contains(std::string_view list, std::string_view word) {
+  for (std::size_t at = list.find(word); !word.empty() && at != std::string_view::npos;
+       at = list.find(word, at + 1))
+    if (list[at - 1] == ' ' && list[at + word.size()] == ' ') return true;
+  return false;
 }
 
 Result unknown(std::string why) {
@@ -122,6 +95,7 @@ Result Evaluator::compute_builtin(const Node& node, Want want) {
   if (word == "SWITCH") return switch_list(node, want);
   if (word == "IFERROR" || word == "IFNA") return after_failure(node, want);
   if (word == "INDEX") return index_into(node, want);
+  if (word == "ROW" || word == "COLUMN") return position_of(node, want);
   if (contains(kTests, word)) return test_for_error(node, want);
   if (contains(kNotRepeatable, word) || word.empty())
     return unknown("uses " + (word.empty() ? std::string("a function") : node.word) +
@@ -206,6 +180,20 @@ Result Evaluator::test_for_error(const Node& node, Want want) {
   return of_value(Any(holds ? 1.0 : 0.0));
 }
 
+// The row or column of a reference, or of the cell itself, counted from 1.
+Result Evaluator::position_of(const Node& node, Want want) {
+  Address place = cell_;
+  if (!node.children.empty()) {
+    const auto area = area_behind(node.children.front());
+    if (!area || (!area->single() && want != Want::element))
+      return unknown("uses " + node.word + " of a range inside another function");
+    place = area->first;
+    if (formula_.array && area->rows() > 1) place.row += formula_.row;
+    if (formula_.array && area->columns() > 1) place.column += formula_.column;
+  }
+  return of_value(Any((node.word == "ROW" ? place.row : place.column) + 1.0));
+}
+
 // INDEX of a reference leads to one cell, whatever the others hold.
 Result Evaluator::index_into(const Node& node, Want want) {
   const auto area = area_behind(child(node, 0));
@@ -266,7 +254,7 @@ Result Evaluator::through_calc(const Node& node, Want want) {
   const auto failed = [&](CalcError error) {
     if (in_range) return of_fault(*in_range);
     if (latent_) return of_fault(*latent_);
-    return calc_fault(error, node.word + ", one of Calc's own functions");
+    return calc_fault(error, node.word + ", a function of Calc, fails");
   };
   try {
     const Reference<XFunctionAccess> access(

@@ -43,6 +43,20 @@ Result calc_fault(CalcError error, std::string text) {
   return of_fault(std::move(fault));
 }
 
+Result engine_fault(CalcError error, std::string text) {
+  Fault fault;
+  fault.origin = Fault::Origin::engine;
+  fault.error = error;
+  fault.text = std::move(text);
+  return of_fault(std::move(fault));
+}
+
+// A sentence of the engine with its full stop, so that another may follow.
+std::string ended(std::string text) {
+  if (!text.empty() && text.back() != '.') text += '.';
+  return text;
+}
+
 const char* words_for(CalcError error) {
   switch (error) {
     case CalcError::division:
@@ -102,6 +116,10 @@ Result Evaluator::compute(const Node& node, Want want) {
       return compute_engine_call(node, want);
     case NodeKind::builtin_call:
       return compute_builtin(node, want);
+    case NodeKind::broken:
+      return calc_fault(CalcError::reference, node.word);
+    case NodeKind::refused:
+      return unknown("holds " + node.word);
     default:
       return unknown(node.word);
   }
@@ -279,11 +297,7 @@ std::string Evaluator::explain(const Node& node,
 
 Result Evaluator::failed_call(const Node& node, const std::vector<const busbar_value*>& arguments,
                               CalcError error) {
-  Fault fault;
-  fault.origin = Fault::Origin::engine;
-  fault.error = error;
-  fault.text = explain(node, arguments);
-  return of_fault(std::move(fault));
+  return engine_fault(error, ended(explain(node, arguments)));
 }
 
 Result Evaluator::compute_engine_call(const Node& node, Want want) {
@@ -313,6 +327,10 @@ Result Evaluator::compute_engine_call(const Node& node, Want want) {
         break;
       }
     }
+    if (child.kind == NodeKind::refused) {
+      stopped = calc_fault(CalcError::parameter_list, child.word);
+      break;
+    }
     Result argument = compute(child, Want::whole);
     if (!argument.usable()) {
       stopped = std::move(argument);
@@ -337,11 +355,9 @@ Result Evaluator::compute_engine_call(const Node& node, Want want) {
     }
     const Taken taken = to_engine(value, values[i]);
     if (taken != Taken::value && taken != Taken::omitted) {
-      Fault fault;
-      fault.origin = Fault::Origin::engine;
-      fault.text = "the " + name_of_argument(node.function, i) + " of " + node.word + " " +
-                   in_words(taken) + ".";
-      stopped = of_fault(std::move(fault));
+      stopped =
+          engine_fault(CalcError::value, "the " + name_of_argument(node.function, i) + " of " +
+                                             node.word + " " + in_words(taken) + ".");
     }
     arguments[i] = values[i].get();
   }
@@ -351,12 +367,8 @@ Result Evaluator::compute_engine_call(const Node& node, Want want) {
   busbar_value* raw = nullptr;
   const std::int32_t status = busbar_call(node.function, arguments.data(), arguments.size(), &raw);
   const Value answer(raw);
-  if (status != BUSBAR_OK || !answer) {
-    Fault fault;
-    fault.origin = Fault::Origin::engine;
-    fault.text = "the engine had no memory for " + node.word + ".";
-    return of_fault(std::move(fault));
-  }
+  if (status != BUSBAR_OK || !answer)
+    return engine_fault(CalcError::value, "the engine had no memory for " + node.word + ".");
   const std::string note = blank_note(blanks_before);
   const Any value = to_calc(*answer);
   const CalcError error = error_in(value);
@@ -376,7 +388,7 @@ Result Evaluator::compute_engine_call(const Node& node, Want want) {
                   .fault;
   }
   if (engine_calls_open_ == 0 && explanations_.size() < kMostExplanations)
-    explanations_.push_back(explain(node, arguments) + note);
+    explanations_.push_back(ended(explain(node, arguments)) + note);
   return want == Want::element ? pick(value) : of_value(value);
 }
 

@@ -85,6 +85,7 @@ class Evaluator {
   Result switch_list(const Node& node, Want want);
   Result after_failure(const Node& node, Want want);
   Result test_for_error(const Node& node, Want want);
+  Result position_of(const Node& node, Want want);
   Result index_into(const Node& node, Want want);
   Result through_calc(const Node& node, Want want);
 

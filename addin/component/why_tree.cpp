@@ -98,11 +98,17 @@ TokenNumbers ask(const SheetDocument& document) {
   return numbers;
 }
 
-Node opaque(std::string why) {
+Node with_reason(NodeKind kind, std::string why) {
   Node node;
-  node.kind = NodeKind::opaque;
+  node.kind = kind;
   node.word = std::move(why);
   return node;
+}
+
+Node opaque(std::string why) { return with_reason(NodeKind::opaque, std::move(why)); }
+
+Node deleted_cell() {
+  return with_reason(NodeKind::broken, "a reference to a cell that was deleted");
 }
 
 std::optional<Address> address_of(const SingleReference& reference, const Address& base) {
@@ -121,7 +127,7 @@ std::optional<Address> address_of(const SingleReference& reference, const Addres
 Node reference_node(const SingleReference& from, const SingleReference& to, const Address& base) {
   const auto first = address_of(from, base);
   const auto last = address_of(to, base);
-  if (!first || !last) return opaque("refers to a cell that was deleted");
+  if (!first || !last) return deleted_cell();
   if (first->sheet != last->sheet) return opaque("refers to a range over several sheets");
   Node node;
   node.kind = NodeKind::reference;
@@ -236,8 +242,15 @@ class Parser {
     }
     Node node = operand();
     const sal_Int32 code = peek();
-    if (code >= 0 && code == numbers_.union_of)
-      return fail("joins ranges with ~, which Calc hands to no add-in function");
+    if (code >= 0 && code == numbers_.union_of) {
+      int chain = 0;
+      while (failure_.empty() && take(numbers_.union_of)) {
+        if (++chain > kDeepest) return fail("is too long for WHY");
+        node = operand();
+      }
+      return with_reason(NodeKind::refused,
+                         "ranges joined with ~, which Calc hands to no add-in function");
+    }
     if (code >= 0 && (code == numbers_.range || code == numbers_.intersection))
       return fail("computes a range while it runs");
     return negative ? wrapped(NodeKind::negative, node) : node;
@@ -292,11 +305,10 @@ class Parser {
     if (data >>= single) return reference_node(single, single, base_);
     if (data >>= both) return reference_node(both.Reference1, both.Reference2, base_);
     if (data >>= elsewhere)
-      return opaque(
-          "refers straight into another file, which Calc does not hand to an add-in; put that "
-          "value "
-          "into a cell of its own and refer to the cell");
-    if (!data.hasValue()) return opaque("holds a reference to a cell that was deleted");
+      return with_reason(NodeKind::refused,
+                         "a reference straight into another file, which Calc hands to no add-in "
+                         "function; put that value into a cell of its own and refer to the cell");
+    if (!data.hasValue()) return deleted_cell();
     Node node;
     node.kind = NodeKind::literal;
     node.value = data;

@@ -41,7 +41,9 @@ enum class NodeKind {
   negative,
   percent,
   binary,
-  opaque  // what cannot be taken apart; `word` says why, as the end of a sentence
+  broken,   // an error whichever way it is used; `word` says why
+  refused,  // what Calc hands to no add-in function; `word` says why
+  opaque    // what cannot be taken apart; `word` says why, as the end of a sentence
 };
 
 struct Node {

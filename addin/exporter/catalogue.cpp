@@ -3,7 +3,6 @@
 #include <busbar.h>
 
 #include <algorithm>
-#include <array>
 #include <set>
 #include <stdexcept>
 
@@ -19,26 +18,18 @@ bool is_digit(char c) { return c >= '0' && c <= '9'; }
 char to_lower(char c) { return is_upper(c) ? static_cast<char>(c - 'A' + 'a') : c; }
 char to_upper(char c) { return is_lower(c) ? static_cast<char>(c - 'a' + 'A') : c; }
 
-// Words of UNOIDL, of C++20 and names that the generated method body uses.
-constexpr std::array<std::string_view, 108> kReserved{
-    "alignas",      "alignof",   "and",       "any",       "asm",       "attribute",
-    "auto",         "bitand",    "bitor",     "boolean",   "bool",      "bound",
-    "break",        "byte",      "case",      "catch",     "char",      "class",
-    "compl",        "concept",   "const",     "constants", "constexpr", "constrained",
-    "continue",     "decltype",  "default",   "delete",    "do",        "document",
-    "double",       "else",      "enum",      "exception", "explicit",  "export",
-    "extern",       "false",     "FALSE",     "float",     "for",       "friend",
-    "get",          "given",     "goto",      "hyper",     "if",        "in",
-    "inline",       "inout",     "int",       "interface", "long",      "maybeambiguous",
-    "maybedefault", "maybevoid", "module",    "mutable",   "namespace", "needs",
-    "new",          "noexcept",  "not",       "nullptr",   "observes",  "oneway",
-    "operator",     "optional",  "or",        "out",       "private",   "property",
-    "protected",    "public",    "published", "raises",    "readonly",  "register",
-    "removable",    "requires",  "return",    "sequence",  "service",   "set",
-    "short",        "signed",    "singleton", "sizeof",    "static",    "string",
-    "struct",       "switch",    "template",  "this",      "throw",     "transient",
-    "true",         "try",       "type",      "typedef",   "typeid",    "typename",
-    "union",        "unsigned",  "using",     "virtual",   "void",      "while"};
+// Words of UNOIDL, of C++20 and names that the generated method body uses, a blank on each side.
+constexpr std::string_view kReserved =
+    " FALSE alignas alignof and any asm attribute auto bitand bitor bool boolean bound "
+    "break byte case catch char class compl concept const constants constexpr constrained "
+    "continue decltype default delete do document double else enum exception explicit "
+    "export extern false float for friend get given goto hyper if in inline inout int "
+    "interface long maybeambiguous maybedefault maybevoid module mutable namespace needs "
+    "new noexcept not nullptr observes oneway operator optional or out private property "
+    "protected public published raises readonly register removable requires return "
+    "sequence service set short signed singleton sizeof static string struct switch "
+    "template this throw transient true try type typedef typeid typename union unsigned "
+    "using virtual void while ";
 
 [[noreturn]] void refuse(const std::string& function, const std::string& why) {
   throw std::runtime_error("catalogue row " + function + ": " + why);
@@ -145,8 +136,7 @@ std::string parameter_identifier(std::string_view argument_name) {
       identifier += word_starts ? to_upper(c) : c;
     word_starts = false;
   }
-  const bool reserved =
-      std::find(kReserved.begin(), kReserved.end(), identifier) != kReserved.end();
+  const bool reserved = kReserved.find(" " + identifier + " ") != std::string_view::npos;
   if (reserved) identifier += "Value";
   if (!identifier.empty() && is_digit(identifier.front())) identifier.insert(0, "argument");
   return identifier;
