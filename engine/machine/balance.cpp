@@ -54,10 +54,11 @@ Outcome<Stream> mix_out(std::span<const Stream> streams) {
   for (std::size_t i = 0; i < streams.size(); ++i) {
     const Stream& stream = streams[i];
     if (!stream.flow) {
-      return Failure{Fault::missing,
-                     1,
-                     "holds a stream without a flow, number {0} of the range; SET_FLOW gives it one",
-                     {{{static_cast<double>(i + 1), Quantity::number}}}};
+      return Failure{
+          Fault::missing,
+          1,
+          "holds a stream without a flow, number {0} of the range; SET_FLOW gives it one",
+          {{{static_cast<double>(i + 1), Quantity::number}}}};
     }
     flow += *stream.flow;
     energy += *stream.flow * stream.enthalpy;
@@ -105,8 +106,8 @@ Outcome<Stream> spray_out(const Stream& steam, const Stream& water, double outle
   if (!(outlet->enthalpy > water.enthalpy)) {
     return Failure{Fault::impossible, 2, "holds more enthalpy than the outlet: it cannot cool it"};
   }
-  const double spray = *steam.flow * (steam.enthalpy - outlet->enthalpy) /
-                       (outlet->enthalpy - water.enthalpy);
+  const double spray =
+      *steam.flow * (steam.enthalpy - outlet->enthalpy) / (outlet->enthalpy - water.enthalpy);
   return water::stream_of(*outlet, *steam.flow + spray, steam.tag);
 }
 

@@ -1,5 +1,7 @@
 #include "machine/expansion.hpp"
 
+#include <boost/math/differentiation/finite_difference.hpp>
+
 #include "water/state.hpp"
 #include "water/stream.hpp"
 
@@ -9,10 +11,8 @@ namespace {
 using water::State;
 
 Failure wrong_pressure(const char* reason, double outlet, double inlet) {
-  return {Fault::impossible,
-          2,
-          reason,
-          {{{outlet, Quantity::pressure}, {inlet, Quantity::pressure}}}};
+  return {
+      Fault::impossible, 2, reason, {{{outlet, Quantity::pressure}, {inlet, Quantity::pressure}}}};
 }
 
 // The state after an isentropic change to the pressure; its failure is put down to input 2.
@@ -81,18 +81,21 @@ Outcome<double> pump_efficiency(const Stream& inlet, const Stream& outlet) {
 }
 
 Outcome<double> pump_efficiency_per_kelvin(const Stream& inlet, const Stream& outlet) {
-  // Small against any reading, large against the rounding of the enthalpy.
-  constexpr double kStep = 0.01;
-  double efficiency[2] = {};
-  for (int side = 0; side < 2; ++side) {
-    const double temperature = outlet.temperature + (side == 0 ? -kStep : kStep);
+  Failure failure;
+  const auto efficiency = [&](double temperature) {
     const Outcome<State> state = water::at_pressure_temperature(outlet.pressure, temperature);
-    if (!state) return state.failure().about(2);
+    if (!state) {
+      failure = state.failure().about(2);
+      return 0.0;
+    }
     const Outcome<double> found = pump_efficiency(inlet, water::moved_to(outlet, *state));
-    if (!found) return found.failure();
-    efficiency[side] = *found;
-  }
-  return (efficiency[1] - efficiency[0]) / (2 * kStep);
+    if (!found) failure = found.failure();
+    return found ? *found : 0.0;
+  };
+  const double slope =
+      boost::math::differentiation::finite_difference_derivative(efficiency, outlet.temperature);
+  if (failure.fault != Fault::none) return failure;
+  return slope;
 }
 
 Outcome<Stream> valve_out(const Stream& inlet, double outlet_pressure) {

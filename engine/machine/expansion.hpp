@@ -23,7 +23,7 @@ Outcome<Stream> pump_out(const Stream& inlet, double outlet_pressure, double eff
 /// (h2s - h1) / (h2 - h1).
 Outcome<double> pump_efficiency(const Stream& inlet, const Stream& outlet);
 
-/// Change of the pump efficiency for one kelvin more of outlet temperature, by central difference.
+/// Change of the pump efficiency for one kelvin more of outlet temperature.
 Outcome<double> pump_efficiency_per_kelvin(const Stream& inlet, const Stream& outlet);
 
 /// h2 = h1 at a lower or equal pressure.
