@@ -206,7 +206,8 @@ Outcome<double> saturation_pressure(double temperature) {
     return outside(1, "{0} is above {1}, the critical temperature, where the saturation line ends",
                    value, {kCriticalTemperature, Quantity::temperature});
   }
-  return std::fmin(saturation_pressure_equation(temperature), kCriticalPressure);
+  return std::fmax(kLowestSaturationPressure,
+                   std::fmin(saturation_pressure_equation(temperature), kCriticalPressure));
 }
 
 }  // namespace busbar::water

@@ -2,6 +2,7 @@
 
 #include <algorithm>
 #include <cmath>
+#include <optional>
 
 #include "water/backward/temperature.hpp"
 #include "water/backward/volume.hpp"
@@ -22,12 +23,13 @@ struct Bounds;
 template <>
 struct Bounds<Given::enthalpy> {
   static constexpr Quantity kQuantity = Quantity::enthalpy;
-  static constexpr double kLowest = -1e3;  // below h(273.15 K) of every pressure
-  static constexpr double kHighest = 8e6;  // above h(2273.15 K) of every pressure
+  static constexpr double kLowest = -1e3;     // below h(273.15 K) of every pressure
+  static constexpr double kHighest = 4.17e6;  // above h2(1073.15 K) of every pressure
   static constexpr double kSaturatedLiquid =
       1.68e6;  // above region 1 at every pressure up to 623.15 K
   static constexpr double kSaturatedVapour = 2.49e6;  // below h'' of every pressure up to p13
-  static constexpr double kRegion2 = 2.82e6;          // above h2(B23) at every pressure
+  static constexpr double kLowest23 = 2.56e6;         // below h2(B23) of every pressure
+  static constexpr double kHighest23 = 2.82e6;        // above it
   static constexpr const char* kBelow =
       "{0} is below {1}, the enthalpy at {2} and this pressure, the lowest temperature of "
       "IAPWS-IF97";
@@ -46,7 +48,8 @@ struct Bounds<Given::entropy> {
   static constexpr double kHighest = 1e300;
   static constexpr double kSaturatedLiquid = 3.79e3;
   static constexpr double kSaturatedVapour = 5.20e3;
-  static constexpr double kRegion2 = 5.27e3;
+  static constexpr double kLowest23 = 5.04e3;
+  static constexpr double kHighest23 = 5.27e3;
   static constexpr const char* kBelow =
       "{0} is below {1}, the entropy at {2} and this pressure, the lowest temperature of "
       "IAPWS-IF97";
@@ -182,34 +185,46 @@ class Isobar {
     return found(state);
   }
 
+  // A solution well inside a region proves the region, because enthalpy and entropy rise with
+  // temperature in each: no boundary needs to be evaluated. Where the start or the solution lies
+  // next to a limit nothing is said.
+  template <class Equation>
+  std::optional<Found> well_inside(Region region, double start, double lowest, double highest) {
+    if (!(start > lowest + kMargin && start < highest - kMargin)) return std::nullopt;
+    const Inverse inverse = invert<Equation>(start, lowest, highest);
+    if (!inverse.converged || inverse.temperature < lowest + kCertain ||
+        inverse.temperature > highest - kCertain) {
+      return std::nullopt;
+    }
+    return found(make_state(region, pressure_, inverse.temperature, inverse.properties));
+  }
+
+  std::optional<Found> well_inside_region_1(double highest) {
+    if (!(value_ > Bound::kLowest && value_ < Bound::kSaturatedLiquid)) return std::nullopt;
+    return well_inside<Region1Equation>(Region::liquid, Bound::backward_1(pressure_, value_),
+                                        kLowestTemperature, highest);
+  }
+
+  std::optional<Found> well_inside_region_2(double lowest) {
+    if (!(value_ > Bound::kSaturatedVapour && value_ < Bound::kHighest)) return std::nullopt;
+    return well_inside<Region2Equation>(Region::vapour, Bound::backward_2(pressure_, value_),
+                                        lowest, kHighestTemperature2);
+  }
+
   // Up to 16.529 MPa: region 1, the two-phase region, region 2, region 5.
   Outcome<Found> below_region_3() {
-    if (pressure_ < kLowestSaturationPressure) {
+    const bool has_liquid = pressure_ >= kLowestSaturationPressure;
+    const double saturation =
+        has_liquid ? std::min(saturation_temperature_equation(pressure_), kTemperature13)
+                   : kLowestTemperature;
+    if (has_liquid) {
+      if (const auto state = well_inside_region_1(saturation)) return *state;
+    }
+    if (const auto state = well_inside_region_2(saturation)) return *state;
+    if (!has_liquid) {
       const Properties lowest = properties_2(pressure_, kLowestTemperature);
       if (value_ < of(lowest)) return below(lowest);
       return in_vapour(kLowestTemperature);
-    }
-    const double saturation = std::min(saturation_temperature_equation(pressure_), kTemperature13);
-    // A solution on the right side of the saturation temperature proves its region: enthalpy and
-    // entropy rise with temperature.
-    if (value_ > Bound::kLowest && value_ < Bound::kSaturatedLiquid) {
-      const double start = Bound::backward_1(pressure_, value_);
-      if (start > kLowestTemperature + kMargin && start < saturation - kMargin) {
-        const Inverse inverse = invert<Region1Equation>(start, kLowestTemperature, saturation);
-        if (inverse.converged && inverse.temperature >= kLowestTemperature + kCertain &&
-            inverse.temperature < saturation - kCertain) {
-          return answer(Region::liquid, inverse, kLowestTemperature, saturation);
-        }
-      }
-    } else if (value_ > Bound::kSaturatedVapour && value_ < Bound::kHighest) {
-      const double start = Bound::backward_2(pressure_, value_);
-      if (start > saturation + kMargin && start < kHighestTemperature2 - kMargin) {
-        const Inverse inverse = invert<Region2Equation>(start, saturation, kHighestTemperature2);
-        if (inverse.converged && inverse.temperature > saturation + kCertain &&
-            inverse.temperature <= kHighestTemperature2 - kCertain) {
-          return answer(Region::vapour, inverse, saturation, kHighestTemperature2);
-        }
-      }
     }
     const Saturated saturated = saturated_at(pressure_);
     if (value_ < of(saturated.liquid)) return in_region_1(saturated.temperature);
@@ -219,30 +234,14 @@ class Isobar {
 
   // From 16.529 to 100 MPa: region 1, region 3 (with the two-phase region in it), regions 2 and 5.
   Outcome<Found> through_region_3() {
+    if (const auto state = well_inside_region_1(kTemperature13)) return *state;
     const double boundary = std::max(boundary_23_temperature(pressure_), kTemperature13);
-    if (value_ > Bound::kLowest && value_ < Bound::kSaturatedLiquid) {
-      const double start = Bound::backward_1(pressure_, value_);
-      if (start > kLowestTemperature + kMargin && start < kTemperature13 - kMargin) {
-        const Inverse inverse = invert<Region1Equation>(start, kLowestTemperature, kTemperature13);
-        if (inverse.converged && inverse.temperature >= kLowestTemperature + kCertain &&
-            inverse.temperature <= kTemperature13 - kCertain) {
-          return answer(Region::liquid, inverse, kLowestTemperature, kTemperature13);
-        }
-      }
-    } else if (value_ > Bound::kRegion2 && value_ < Bound::kHighest) {
-      const double start = Bound::backward_2(pressure_, value_);
-      if (start > boundary + kMargin && start < kHighestTemperature2 - kMargin) {
-        const Inverse inverse = invert<Region2Equation>(start, boundary, kHighestTemperature2);
-        if (inverse.converged && inverse.temperature >= boundary + kCertain &&
-            inverse.temperature <= kHighestTemperature2 - kCertain) {
-          return answer(Region::vapour, inverse, boundary, kHighestTemperature2);
-        }
-      }
+    if (value_ > Bound::kHighest23) {
+      if (const auto state = well_inside_region_2(boundary)) return *state;
     }
-    const Properties end_1 = properties_1(pressure_, kTemperature13);
-    if (value_ <= of(end_1)) return in_region_1(kTemperature13);
-    const Properties start_2 = properties_2(pressure_, boundary);
-    const bool above_boundary = value_ >= of(start_2);
+    if (value_ < Bound::kSaturatedLiquid && value_ <= of(properties_1(pressure_, kTemperature13))) {
+      return in_region_1(kTemperature13);
+    }
     if (pressure_ < kCriticalPressure && may_be_two_phase()) {
       const Saturated saturated = saturated_at(pressure_);
       evaluations_ += saturated.evaluations;
@@ -251,8 +250,10 @@ class Isobar {
         return between(saturated);
       }
     }
-    if (above_boundary) return in_vapour(boundary);
-    return in_region_3(end_1, start_2, boundary);
+    if (value_ > Bound::kLowest23 && value_ >= of(properties_2(pressure_, boundary))) {
+      return in_vapour(boundary);
+    }
+    return in_region_3(boundary);
   }
 
   // The equations psat(h) and psat(s) of SR3-03(2014) tell on which side of the saturation line a
@@ -263,7 +264,7 @@ class Isobar {
            pressure_ < kPressure13 * (1 + 1e-3);
   }
 
-  Outcome<Found> in_region_3(const Properties& end_1, const Properties& start_2, double boundary) {
+  Outcome<Found> in_region_3(double boundary) {
     const Inverse inverse = invert_region_3<kGiven>(pressure_, value_);
     evaluations_ += inverse.evaluations;
     if (!inverse.converged) return no_convergence();
@@ -271,14 +272,15 @@ class Isobar {
       const DensityFound density = density_3(pressure_, kTemperature13, true);
       evaluations_ += density.evaluations;
       if (!density.converged) return no_convergence();
-      return gap(Region::liquid, kTemperature13, end_1,
+      return gap(Region::liquid, kTemperature13, properties_1(pressure_, kTemperature13),
                  properties_3(density.density, kTemperature13));
     }
     if (inverse.temperature > boundary) {
       const DensityFound density = density_3(pressure_, boundary, false);
       evaluations_ += density.evaluations;
       if (!density.converged) return no_convergence();
-      return gap(Region::vapour, boundary, properties_3(density.density, boundary), start_2);
+      return gap(Region::vapour, boundary, properties_3(density.density, boundary),
+                 properties_2(pressure_, boundary));
     }
     return answer(Region::near_critical, inverse, kTemperature13, boundary);
   }

@@ -24,14 +24,15 @@ TEST(Saturation, LineEndsInTheCriticalPoint) {
   EXPECT_EQ(*saturation_pressure(kCriticalTemperature), kCriticalPressure);
   EXPECT_NEAR(*saturation_temperature(kCriticalPressure), kCriticalTemperature, 2e-9);
   EXPECT_LE(*saturation_temperature(kCriticalPressure), kCriticalTemperature);
-  EXPECT_EQ(*saturation_pressure(kLowestTemperature), kLowestSaturationPressure);
+  EXPECT_NEAR(*saturation_pressure(kLowestTemperature), kLowestSaturationPressure, 1e-11);
   EXPECT_GE(*saturation_temperature(kLowestSaturationPressure), kLowestTemperature);
 }
 
 TEST(Saturation, ConstantsAreThoseOfEquation30) {
-  EXPECT_NEAR(kPressure13, saturation_pressure_equation(kTemperature13), 1e-15 * kPressure13);
+  // The last digits of equation 30 depend on how a compiler folds it.
+  EXPECT_NEAR(kPressure13, saturation_pressure_equation(kTemperature13), 1e-14 * kPressure13);
   EXPECT_NEAR(kLowestSaturationPressure, saturation_pressure_equation(kLowestTemperature),
-              1e-15 * kLowestSaturationPressure);
+              1e-14 * kLowestSaturationPressure);
 }
 
 TEST(Saturation, TemperatureAndPressureAreInverse) {
