@@ -1,6 +1,7 @@
 #include "catalogue.hpp"
 
 #include <cctype>
+#include <ostream>
 
 namespace busbar::reference {
 namespace {
@@ -45,6 +46,8 @@ std::string Function::signature() const {
 }
 
 std::string Function::reference_file() const { return slug(chapter) + '/' + lower(name) + ".csv"; }
+
+void PrintTo(const Function& function, std::ostream* out) { *out << function.name; }
 
 std::vector<Function> catalogue() {
   std::vector<Function> functions;

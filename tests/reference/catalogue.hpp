@@ -1,6 +1,7 @@
 // The catalogue as the C interface shows it, for tests.
 #pragma once
 
+#include <iosfwd>
 #include <string>
 #include <vector>
 
@@ -22,6 +23,9 @@ struct Function {
   /// The file with the published figures: "<chapter-slug>/<name in lower case>.csv".
   [[nodiscard]] std::string reference_file() const;
 };
+
+/// For GoogleTest's messages.
+void PrintTo(const Function& function, std::ostream* out);
 
 std::vector<Function> catalogue();
 
