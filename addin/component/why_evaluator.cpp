@@ -12,6 +12,7 @@ namespace {
 
 using com::sun::star::uno::Any;
 
+constexpr int kDeepest = 400;   // levels of trees and names together; bounds the recursion
 constexpr int kMostNames = 16;  // names that stand for names
 constexpr std::size_t kMostExplanations = 3;
 constexpr std::size_t kMostBlanksNamed = 4;
@@ -93,7 +94,15 @@ std::string name_of_argument(const busbar_function* function, std::size_t index)
 
 Result Evaluator::compute(const Node& node, Want want) {
   if (budget_.nodes == 0) return unknown("is too long to be taken apart");
+  if (depth_ >= kDeepest) return unknown("is nested too deeply to be taken apart");
   --budget_.nodes;
+  ++depth_;
+  Result result = compute_kind(node, want);
+  --depth_;
+  return result;
+}
+
+Result Evaluator::compute_kind(const Node& node, Want want) {
   switch (node.kind) {
     case NodeKind::literal: {
       const CalcError error = error_in(node.value);

@@ -70,6 +70,7 @@ class Evaluator {
 
   Result element(const Node& node) { return compute(node, Want::element); }
   Result compute(const Node& node, Want want);
+  Result compute_kind(const Node& node, Want want);
   Result compute_reference(const Area& area, Want want);
   Result compute_named(const Node& node, Want want);
   Result compute_binary(const Node& node, Want want);
@@ -106,6 +107,7 @@ class Evaluator {
   Address cell_;
   const CellFormula& formula_;
   Budget& budget_;
+  int depth_ = 0;
   int names_open_ = 0;
   int engine_calls_open_ = 0;
   std::vector<Address> blanks_;

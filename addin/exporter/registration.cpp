@@ -20,7 +20,8 @@ std::string ended(std::string text) {
 std::string argument_help(const Argument& argument) {
   std::string text = ended(argument.meaning);
   if (!argument.range.front().empty()) text += " [" + argument.range.front() + "]";
-  if (argument.optional) text += " Optional.";
+  // Calc itself calls every argument optional that takes a value or a range alike.
+  text += argument.optional ? " Optional." : " Required.";
   return text;
 }
 

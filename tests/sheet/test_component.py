@@ -66,7 +66,7 @@ class Registration(SheetCase):
     def test_optional_arguments_say_so(self):
         arguments = dict(registered(self.oxt)["STEAM"])
         self.assertTrue(arguments["options"].endswith("Optional."))
-        self.assertNotIn("Optional", arguments["pressure"])
+        self.assertTrue(arguments["pressure"].endswith("Required."))
         self.assertIn("bar", arguments["pressure"])
 
     def test_the_extension_is_described(self):
