@@ -33,6 +33,9 @@ struct State {
 // Failures: outside_range (argument 1 or 2, the limit that was crossed among the measures),
 // zero_or_blank never (callers check), no_convergence when an iteration reaches its cap.
 // A value that is not finite is outside_range.
+//
+// Where the equations of IF97 do not quite meet: solve/isobar.hpp states the rule at the boundaries
+// of regions, solve/density.hpp the one in the last 0.2 mK below the critical temperature.
 
 /// State at pressure (Pa) and temperature (K). On the saturation line the liquid is returned.
 /// Source: IAPWS R7-97(2012), equations 7, 15, 28, 32; boundaries by equations 5 and 30.

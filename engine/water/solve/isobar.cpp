@@ -9,27 +9,20 @@
 #include "water/constants.hpp"
 #include "water/equations/saturation.hpp"
 #include "water/failure.hpp"
+#include "water/solve/bounds.hpp"
 #include "water/solve/density.hpp"
 
 namespace busbar::water {
 
 namespace {
 
-// Bounds that decide which region is tried first; whether it answers is decided by its own
-// solution. Where they leave doubt the boundary itself is evaluated.
+// Words and backward equations for one given property.
 template <Given kGiven>
-struct Bounds;
+struct Property;
 
 template <>
-struct Bounds<Given::enthalpy> {
+struct Property<Given::enthalpy> : Bounds<Given::enthalpy> {
   static constexpr Quantity kQuantity = Quantity::enthalpy;
-  static constexpr double kLowest = -1e3;     // below h(273.15 K) of every pressure
-  static constexpr double kHighest = 4.17e6;  // above h2(1073.15 K) of every pressure
-  static constexpr double kSaturatedLiquid =
-      1.68e6;  // above region 1 at every pressure up to 623.15 K
-  static constexpr double kSaturatedVapour = 2.49e6;  // below h'' of every pressure up to p13
-  static constexpr double kLowest23 = 2.56e6;         // below h2(B23) of every pressure
-  static constexpr double kHighest23 = 2.82e6;        // above it
   static constexpr const char* kBelow =
       "{0} is below {1}, the enthalpy at {2} and this pressure, the lowest temperature of "
       "IAPWS-IF97";
@@ -42,14 +35,8 @@ struct Bounds<Given::enthalpy> {
 };
 
 template <>
-struct Bounds<Given::entropy> {
+struct Property<Given::entropy> : Bounds<Given::entropy> {
   static constexpr Quantity kQuantity = Quantity::entropy;
-  static constexpr double kLowest = -100;
-  static constexpr double kHighest = 1e300;
-  static constexpr double kSaturatedLiquid = 3.79e3;
-  static constexpr double kSaturatedVapour = 5.20e3;
-  static constexpr double kLowest23 = 5.04e3;
-  static constexpr double kHighest23 = 5.27e3;
   static constexpr const char* kBelow =
       "{0} is below {1}, the entropy at {2} and this pressure, the lowest temperature of "
       "IAPWS-IF97";
@@ -101,7 +88,7 @@ class Isobar {
   Outcome<Found> find() { return pressure_ <= kPressure13 ? below_region_3() : through_region_3(); }
 
  private:
-  using Bound = Bounds<kGiven>;
+  using Bound = Property<kGiven>;
 
   static double of(const Properties& properties) { return given_of<kGiven>(properties); }
 
@@ -200,13 +187,13 @@ class Isobar {
   }
 
   std::optional<Found> well_inside_region_1(double highest) {
-    if (!(value_ > Bound::kLowest && value_ < Bound::kSaturatedLiquid)) return std::nullopt;
+    if (!(value_ > Bound::kBelowRegion1 && value_ < Bound::kAboveRegion1)) return std::nullopt;
     return well_inside<Region1Equation>(Region::liquid, Bound::backward_1(pressure_, value_),
                                         kLowestTemperature, highest);
   }
 
   std::optional<Found> well_inside_region_2(double lowest) {
-    if (!(value_ > Bound::kSaturatedVapour && value_ < Bound::kHighest)) return std::nullopt;
+    if (!(value_ > Bound::kBelowRegion2 && value_ < Bound::kAboveRegion2)) return std::nullopt;
     return well_inside<Region2Equation>(Region::vapour, Bound::backward_2(pressure_, value_),
                                         lowest, kHighestTemperature2);
   }
@@ -226,6 +213,7 @@ class Isobar {
       if (value_ < of(lowest)) return below(lowest);
       return in_vapour(kLowestTemperature);
     }
+    if (value_ > Bound::kAboveDome) return in_vapour(saturation);
     const Saturated saturated = saturated_at(pressure_);
     if (value_ < of(saturated.liquid)) return in_region_1(saturated.temperature);
     if (value_ <= of(saturated.vapour)) return between(saturated);
@@ -236,10 +224,10 @@ class Isobar {
   Outcome<Found> through_region_3() {
     if (const auto state = well_inside_region_1(kTemperature13)) return *state;
     const double boundary = std::max(boundary_23_temperature(pressure_), kTemperature13);
-    if (value_ > Bound::kHighest23) {
+    if (value_ > Bound::kAboveBoundary23) {
       if (const auto state = well_inside_region_2(boundary)) return *state;
     }
-    if (value_ < Bound::kSaturatedLiquid && value_ <= of(properties_1(pressure_, kTemperature13))) {
+    if (value_ < Bound::kAboveRegion1 && value_ <= of(properties_1(pressure_, kTemperature13))) {
       return in_region_1(kTemperature13);
     }
     if (pressure_ < kCriticalPressure && may_be_two_phase()) {
@@ -250,7 +238,7 @@ class Isobar {
         return between(saturated);
       }
     }
-    if (value_ > Bound::kLowest23 && value_ >= of(properties_2(pressure_, boundary))) {
+    if (value_ > Bound::kBelowBoundary23 && value_ >= of(properties_2(pressure_, boundary))) {
       return in_vapour(boundary);
     }
     return in_region_3(boundary);
@@ -260,6 +248,7 @@ class Isobar {
   // state is, but for their error; so does being far outside the enthalpies of the line.
   bool may_be_two_phase() const {
     constexpr double kError = 1e-4;
+    if (value_ < Bound::kBelowDome3 || value_ > Bound::kAboveDome3) return false;
     return pressure_ < Bound::saturation_pressure_3(value_) * (1 + kError) ||
            pressure_ < kPressure13 * (1 + 1e-3);
   }

@@ -13,7 +13,8 @@
 //  - At pressure and temperature the boundaries belong to the lower region: 623.15 K to region 1,
 //    B23 to region 2, 1073.15 K to region 2.
 //  - Between saturated liquid and vapour, both included, the state is two-phase; this comes before
-//    the overlap of regions 2 and 3.
+//    the overlap of regions 2 and 3, which reaches into the saturated vapour up to 1 kPa above
+//    16.529 MPa (the temperature then steps by 2 mK from dryness 1 to region 2).
 // In a gap of both properties (p,s) -> h -> (p,h) comes back exactly. Where the enthalpy has a gap
 // and the entropy an overlap or the other way round (both then differ by less than the published
 // step of the Gibbs energy, 0.005 kJ/kg, allows), it comes back within that step.

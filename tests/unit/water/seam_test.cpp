@@ -12,6 +12,7 @@
 #include "published.hpp"
 #include "sampling.hpp"
 #include "water/equations/saturation.hpp"
+#include "water/solve/bounds.hpp"
 #include "water/solve/density.hpp"
 #include "water/solve/isobar.hpp"
 
@@ -281,6 +282,44 @@ TEST(Seams, StatesBesideTheBoundaries) {
       }
     }
   }
+}
+
+template <Given kGiven>
+void check_bounds() {
+  using Bound = Bounds<kGiven>;
+  const auto of = [](const Properties& at) { return given_of<kGiven>(at); };
+  for (int k = 0; k <= 20000; ++k) {
+    const double share = k / 20000.0;
+    // Saturated states of both kinds.
+    const double saturation =
+        kLowestSaturationPressure * std::pow(kCriticalPressure / kLowestSaturationPressure, share);
+    const Saturated dome = saturated_at(saturation);
+    EXPECT_LT(of(dome.vapour), Bound::kAboveDome);
+    if (saturation <= kPressure13) {
+      EXPECT_LT(of(dome.liquid), Bound::kAboveRegion1);
+      EXPECT_GT(of(dome.vapour), Bound::kBelowRegion2);
+    }
+    const double upper = kPressure13 + share * (kCriticalPressure - kPressure13);
+    const Saturated dome_3 = saturated_at(std::nextafter(upper, 1e9));
+    EXPECT_GT(of(dome_3.liquid), Bound::kBelowDome3);
+    EXPECT_LT(of(dome_3.vapour), Bound::kAboveDome3);
+    // Isobars through region 3.
+    const double p = kPressure13 + share * (kHighestPressure - kPressure13);
+    EXPECT_GT(of(properties_1(p, kLowestTemperature)), Bound::kBelowRegion1);
+    EXPECT_LT(of(properties_1(p, kTemperature13)), Bound::kAboveRegion1);
+    const double on_23 = of(properties_2(p, std::max(boundary_23_temperature(p), kTemperature13)));
+    EXPECT_GT(on_23, Bound::kBelowBoundary23);
+    EXPECT_LT(on_23, Bound::kAboveBoundary23);
+    EXPECT_GT(on_23, Bound::kBelowRegion2);
+    // All pressures.
+    const double any = std::pow(10.0, -9 + 17 * share);
+    EXPECT_LT(of(properties_2(any, kHighestTemperature2)), Bound::kAboveRegion2);
+  }
+}
+
+TEST(Seams, BoundsHoldAtEveryPressure) {
+  check_bounds<Given::enthalpy>();
+  check_bounds<Given::entropy>();
 }
 
 }  // namespace
