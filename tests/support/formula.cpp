@@ -251,11 +251,11 @@ class Reader {
       }
     }
     if (name == "INDEX") return index(values);
-    std::vector<const Value*> arguments;
+    std::vector<Argument> arguments;
     for (std::size_t i = 0; i < values.size(); ++i) {
-      arguments.push_back(given[i] ? &values[i] : nullptr);
+      arguments.push_back(given[i] ? Argument(values[i]) : Argument(nullptr));
     }
-    return call(name, arguments);
+    return call_with(name, std::span<const Argument>(arguments));
   }
 
   [[nodiscard]] Value index(const std::vector<Value>& values) const {

@@ -1,6 +1,7 @@
 #include "value.hpp"
 
 #include <bit>
+#include <cstdio>
 #include <stdexcept>
 
 namespace busbar::support {
@@ -10,19 +11,10 @@ void require(std::int32_t status) {
   if (status != BUSBAR_OK) throw std::runtime_error("the C interface refused a cell");
 }
 
-std::vector<const busbar_value*> handles(std::span<const Value* const> arguments) {
+std::vector<const busbar_value*> handles(std::span<const Argument> arguments) {
   std::vector<const busbar_value*> given;
   given.reserve(arguments.size());
-  for (const Value* argument : arguments) {
-    given.push_back(argument == nullptr ? nullptr : argument->get());
-  }
-  return given;
-}
-
-std::vector<const Value*> pointers(const std::vector<Value>& arguments) {
-  std::vector<const Value*> given;
-  given.reserve(arguments.size());
-  for (const Value& argument : arguments) given.push_back(&argument);
+  for (const Argument& argument : arguments) given.push_back(argument.get());
   return given;
 }
 
@@ -123,19 +115,23 @@ std::string Value::shown(std::size_t row, std::size_t column) const {
   }
 }
 
-Value call(std::string_view name, std::span<const Value* const> arguments) {
+Value call_with(std::string_view name, std::span<const Argument> arguments) {
   const auto given = handles(arguments);
   busbar_value* result = nullptr;
   require(busbar_call_by_name(name.data(), name.size(), given.data(), given.size(), &result));
   return Value(result);
 }
 
-Value call(std::string_view name, const std::vector<Value>& arguments) {
-  return call(name, pointers(arguments));
+Value call_with(std::string_view name, const std::vector<Value>& arguments) {
+  return call_with(name, std::vector<Argument>(arguments.begin(), arguments.end()));
 }
 
-std::string explain(std::string_view name, const std::vector<Value>& arguments) {
-  const auto given = handles(pointers(arguments));
+Value call(std::string_view name, std::initializer_list<Argument> arguments) {
+  return call_with(name, std::span<const Argument>(arguments.begin(), arguments.size()));
+}
+
+std::string explain(std::string_view name, std::initializer_list<Argument> arguments) {
+  const auto given = handles({arguments.begin(), arguments.size()});
   busbar_value* result = nullptr;
   require(
       busbar_explain(busbar_find(name.data(), name.size()), given.data(), given.size(), &result));

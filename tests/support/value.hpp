@@ -3,6 +3,7 @@
 
 #include <cstddef>
 #include <cstdint>
+#include <initializer_list>
 #include <memory>
 #include <span>
 #include <string>
@@ -57,12 +58,26 @@ class Value {
   std::unique_ptr<busbar_value, Free> value_;
 };
 
-/// Calls by name; nullptr among the arguments is one that was left out.
-Value call(std::string_view name, std::span<const Value* const> arguments);
-Value call(std::string_view name, const std::vector<Value>& arguments);
+/// An argument of a call; nullptr is one that was left out. Lives no longer than the call.
+class Argument {
+ public:
+  Argument(const Value& value) : value_(&value) {}  // NOLINT(google-explicit-constructor)
+  Argument(std::nullptr_t) {}                       // NOLINT(google-explicit-constructor)
+  [[nodiscard]] const busbar_value* get() const {
+    return value_ == nullptr ? nullptr : value_->get();
+  }
+
+ private:
+  const Value* value_ = nullptr;
+};
+
+/// Calls by name.
+Value call(std::string_view name, std::initializer_list<Argument> arguments);
+Value call_with(std::string_view name, std::span<const Argument> arguments);
+Value call_with(std::string_view name, const std::vector<Value>& arguments);
 
 /// The explanation of the same call.
-std::string explain(std::string_view name, const std::vector<Value>& arguments);
+std::string explain(std::string_view name, std::initializer_list<Argument> arguments);
 
 /// What Calc shows for a kind of error: "#N/A", "#VALUE!", "Err:502", "Err:523".
 std::string_view error_word(std::int32_t kind);
