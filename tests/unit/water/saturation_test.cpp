@@ -208,6 +208,54 @@ TEST(TwoPhase, StatesByTemperatureJoinTheSaturatedOnes) {
   }
 }
 
+// The same inside the critical band, where equation 28 alone would put the liquid 0.04 kg/m3 and
+// more beside the saturated one (1e-4 of it). What may remain: equations 30 and 31 are inverse to
+// each other within 3e-5 Pa here, and the vapour is asked for 1e-10 K (3e-5 Pa) above the line; the
+// slope of equation 28 at the saturated densities is about 0.1 Pa m3/kg at 0.1 mK and grows with
+// the distance.
+TEST(TwoPhase, StatesByTemperatureJoinTheSaturatedOnesInTheCriticalBand) {
+  for (double distance = 1.9e-4; distance > 1e-5; distance *= 0.9) {
+    const double p = saturation_pressure_equation(kCriticalTemperature - distance);
+    const double t = *saturation_temperature(p);
+    const double bound = 6e-5 / (0.1 * distance / 1e-4) / kCriticalDensity;
+    const auto liquid = at_pressure_temperature(p, t);
+    ASSERT_TRUE(liquid);
+    const double wet = at_pressure_dryness(p, 0)->volume;
+    EXPECT_NEAR(liquid->volume, wet, bound * wet) << distance;
+    const auto vapour = at_pressure_temperature(p, t + 1e-10);
+    ASSERT_TRUE(vapour);
+    const double dry = at_pressure_dryness(p, 1)->volume;
+    EXPECT_NEAR(vapour->volume, dry, bound * dry) << distance;
+  }
+}
+
+// The caps are far from what the iterations need, at the worst places: next to the critical point
+// and on the saturation line.
+TEST(NearCritical, IterationsStayFarFromTheirCaps) {
+  Sampler sampler(24);
+  int inverse = 0;
+  int density = 0;
+  for (int k = 0; k < 30000; ++k) {
+    const double p = kCriticalPressure + (k % 2 == 0 ? 1 : -1) * sampler.log_between(1e-6, 3e6);
+    const double t =
+        k % 3 == 0 ? kCriticalTemperature + sampler.between(-20, 20)
+                   : kCriticalTemperature + (k % 3 == 1 ? 1 : -1) * sampler.log_between(1e-10, 20);
+    const bool liquid = p >= kCriticalPressure || t <= *saturation_temperature(p);
+    const DensityFound found = density_3(p, t, liquid);
+    ASSERT_TRUE(found.converged) << p << " " << t;
+    density = std::max(density, found.evaluations);
+    const Properties at = properties_3(found.density, t);
+    const Inverse by_enthalpy = invert_region_3<Given::enthalpy>(p, at.enthalpy);
+    const Inverse by_entropy = invert_region_3<Given::entropy>(p, at.entropy);
+    ASSERT_TRUE(by_enthalpy.converged && by_entropy.converged) << p << " " << t;
+    inverse = std::max({inverse, by_enthalpy.evaluations, by_entropy.evaluations});
+  }
+  RecordProperty("inverse", inverse);
+  RecordProperty("density", density);
+  EXPECT_LE(inverse, kInverseCap / 4);
+  EXPECT_LE(density, kDensityCap / 2);
+}
+
 // Isobars a little below and above pc, states ever closer to the critical temperature: always an
 // answer, consistent both ways, and rising enthalpy. At the critical point itself one unit in the
 // last place of the pressure (4e-9 Pa) moves the density by the cube root of that over 0.065 Pa,
