@@ -97,7 +97,7 @@ Trouble read_stream_cell(std::size_t index, const Cell& cell, std::optional<Stre
   const auto* text = std::get_if<std::string>(&cell);
   if (text == nullptr || text->empty()) {
     if (const double* number = std::get_if<double>(&cell); number != nullptr && *number == 0) {
-      return trouble(Fault::missing, index, "is zero or blank where a stream is needed");
+      return trouble(Fault::zero_or_blank, index, "is zero or blank where a stream is needed");
     }
     if (std::holds_alternative<double>(cell)) {
       return trouble(Fault::wrong_kind, index, "is a number where a stream is needed");
@@ -120,7 +120,7 @@ Trouble read_word(std::size_t index, const Cell& cell, Slot& slot) {
   }
   if (const double* number = std::get_if<double>(&cell)) {
     if (*number == 0)
-      return trouble(Fault::missing, index, "is zero or blank where a word is needed");
+      return trouble(Fault::zero_or_blank, index, "is zero or blank where a word is needed");
     return trouble(Fault::wrong_kind, index, "is a number where a word is needed");
   }
   return not_a("", "is a logical where a word is needed", index, cell);

@@ -91,6 +91,11 @@ class Caller {
       return {{Fault::wrong_shape, at, "is a range; one cell with the unit set is needed"}, {}};
     }
     const Cell& cell = grid->at(0, 0);
+    if (const double* number = std::get_if<double>(&cell); number != nullptr && *number == 0) {
+      return {{Fault::zero_or_blank, at,
+               "is zero or blank; leave it out or write \"metric\", \"us\" or \"si\""},
+              {}};
+    }
     const auto* text = std::get_if<std::string>(&cell);
     if (text == nullptr || text->empty()) {
       const bool empty = text != nullptr || std::holds_alternative<Blank>(cell);

@@ -184,6 +184,19 @@ double exact_value(const Stream& stream, Quantity quantity) {
   }
 }
 
+const char* edited_reason(Quantity quantity) {
+  switch (quantity) {
+    case Quantity::pressure:
+      return "was edited: its pressure reads {0}, its exact part says {1}; enter a new stream";
+    case Quantity::temperature:
+      return "was edited: its temperature reads {0}, its exact part says {1}; enter a new stream";
+    case Quantity::flow:
+      return "was edited: its flow reads {0}, its exact part says {1}; enter a new stream";
+    default:
+      return "was edited: its dryness reads {0}, its exact part says {1}; enter a new stream";
+  }
+}
+
 // The check digits do not fit. Where the face written anew from the tail does fit them, the face
 // was edited, and the number that differs is named.
 Failure explain_mismatch(const Stream& stream, const Face& face, std::string_view digits) {
@@ -201,10 +214,7 @@ Failure explain_mismatch(const Stream& stream, const Face& face, std::string_vie
     if (!read_number(shown, rounded) || rounded == face.numbers[i].value) continue;
     const double edited = unit_of(face.set, quantity).to_si(face.numbers[i].value);
     return {
-        Fault::damaged_text,
-        1,
-        "was edited: the readable part says {0}, the exact part {1}; enter a new stream instead",
-        {{{edited, quantity}, {exact, quantity}}}};
+        Fault::damaged_text, 1, edited_reason(quantity), {{{edited, quantity}, {exact, quantity}}}};
   }
   return damaged("was edited: its readable part differs from its exact part");
 }
