@@ -154,6 +154,11 @@ class Investigation {
     return working(cell, tree, result, evaluator);
   }
 
+  static std::string sentence_of(const Fault& fault) {
+    if (fault.origin == Fault::Origin::cell) return "a cell that it reads holds an error.";
+    return fault.origin == Fault::Origin::calc ? fault.text + "." : fault.text;
+  }
+
   static Step followed(const Fault& fault) {
     Step step;
     step.follow = true;
@@ -203,8 +208,7 @@ class Investigation {
         step.hides = true;
         return step;
       }
-      step.text = "the cell works, but its formula hides an error: " + hidden.text;
-      if (hidden.origin == Fault::Origin::calc) step.text += ".";
+      step.text = "the cell works, but its formula hides an error: " + sentence_of(hidden);
       return step;
     }
     if (tree.kind == NodeKind::reference && tree.area.single()) {
@@ -227,7 +231,7 @@ class Investigation {
       step.text =
           "the cell works, but WHY, which computes its formula again from the same cells, "
           "meets an error: " +
-          result.fault->text + " Recalculate hard (Ctrl+Shift+F9) and ask again.";
+          sentence_of(*result.fault) + " Recalculate hard (Ctrl+Shift+F9) and ask again.";
     else if (!result.unknown.empty())
       step.text =
           "the cell works, but WHY cannot take its formula apart: it " + result.unknown + ".";

@@ -35,6 +35,18 @@ constexpr std::string_view kTolerant =
     " AGGREGATE AVERAGEIF AVERAGEIFS COLUMNS COUNT COUNTA COUNTBLANK COUNTIF COUNTIFS "
     "HLOOKUP INDEX LOOKUP MATCH MAXIFS MINIFS N ROWS SMALL SUMIF SUMIFS T TYPE VLOOKUP ";
 
+// Functions of single values: a range stands for the cell in the same row or column, or in an array
+// formula for each of its cells in turn.
+constexpr std::string_view kSingle =
+    " ABS ACOS ASIN ATAN ATAN2 CEILING COS COSH DATE DAY DEGREES EVEN EXP FLOOR HOUR INT LEFT LEN "
+    "LN "
+    "LOG LOG10 LOWER MID MOD MONTH MROUND NOT ODD PI POWER PROPER RADIANS RIGHT ROUND ROUNDDOWN "
+    "ROUNDSIG ROUNDUP SEARCH SIGN SIN SINH SQRT SUBSTITUTE TAN TANH TEXT TRIM TRUNC UPPER VALUE "
+    "YEAR ";
+
+// Functions that count or skip errors among their arguments.
+constexpr std::string_view kCounting = " AGGREGATE COUNT COUNTA ";
+
 // Tests that take any error and answer.
 constexpr std::string_view kTests =
     " ISBLANK ISERR ISERROR ISLOGICAL ISNA ISNONTEXT ISNUMBER ISTEXT ";
@@ -117,20 +129,25 @@ Result Evaluator::truth(const Node& node, Want want, bool& holds) {
   return condition;
 }
 
+// What a choosing function gives back: where one value is shown, a range stands for one cell.
+Result Evaluator::branch(const Node& node, Want want) {
+  return want == Want::element ? operand(node, want) : compute(node, want);
+}
+
 Result Evaluator::choose(const Node& node, Want want) {
   if (node.word == "IF") {
     bool holds = false;
     Result condition = truth(child(node, 0), want, holds);
     if (!condition.usable()) return condition;
     if (!holds && node.children.size() < 3) return of_value(Any(0.0));
-    return compute(child(node, holds ? 1 : 2), want);
+    return branch(child(node, holds ? 1 : 2), want);
   }
   Result position = operand(child(node, 0), want);
   if (!position.usable()) return position;
   const double number = as_number(element_of(position.value, 0, 0));
   if (!(number >= 1) || number >= static_cast<double>(node.children.size()))
     return calc_fault(CalcError::argument, "CHOOSE with a position that it does not have");
-  return compute(child(node, static_cast<std::size_t>(number)), want);
+  return branch(child(node, static_cast<std::size_t>(number)), want);
 }
 
 Result Evaluator::condition_list(const Node& node, Want want) {
@@ -138,7 +155,7 @@ Result Evaluator::condition_list(const Node& node, Want want) {
     bool holds = false;
     Result condition = truth(node.children[i], want, holds);
     if (!condition.usable()) return condition;
-    if (holds) return compute(node.children[i + 1], want);
+    if (holds) return branch(node.children[i + 1], want);
   }
   return calc_fault(CalcError::not_available, "IFS without a condition that holds");
 }
@@ -151,18 +168,18 @@ Result Evaluator::switch_list(const Node& node, Want want) {
     const Result candidate = operand(node.children[i], want);
     if (!candidate.usable()) return candidate;
     const Any same = apply(Operator::equal, subject.value, candidate.value);
-    if (as_number(element_of(same, 0, 0)) != 0) return compute(node.children[i + 1], want);
+    if (as_number(element_of(same, 0, 0)) != 0) return branch(node.children[i + 1], want);
   }
-  if (i < node.children.size()) return compute(node.children[i], want);
+  if (i < node.children.size()) return branch(node.children[i], want);
   return calc_fault(CalcError::not_available, "SWITCH without a case that fits");
 }
 
 Result Evaluator::after_failure(const Node& node, Want want) {
-  Result first = compute(child(node, 0), want);
+  Result first = branch(child(node, 0), want);
   if (!first.fault) return first;
   if (node.word == "IFNA" && first.fault->error != CalcError::not_available) return first;
   if (!hidden_) hidden_ = first.fault;
-  return compute(child(node, 1), want);
+  return branch(child(node, 1), want);
 }
 
 Result Evaluator::test_for_error(const Node& node, Want want) {
@@ -224,16 +241,29 @@ Result Evaluator::index_into(const Node& node, Want want) {
   return compute_reference(part, want);
 }
 
+// A single cell goes to Calc as a range of one cell: functions such as MAX skip a text or a blank
+// in a cell that they refuse as a value.
+Any Evaluator::for_calc(const Node& node, const Any& value) {
+  const auto area = area_behind(node);
+  if (!area || !area->single()) return value;
+  const bool blank = document_.content(area->first) == Content::blank;
+  const Any cell = blank ? Any() : value;
+  const Sequence<Any> row(&cell, 1);
+  return Any(Sequence<Sequence<Any>>(&row, 1));
+}
+
 Result Evaluator::through_calc(const Node& node, Want want) {
   if (budget_.calls == 0) return unknown("makes more calls than WHY repeats");
   --budget_.calls;
   const bool tolerant = contains(kTolerant, node.word);
+  const bool single = contains(kSingle, node.word);
+  const bool counting = contains(kCounting, node.word);
   Sequence<Any> arguments(static_cast<sal_Int32>(node.children.size()));
   Any* const argument = arguments.getArray();
   std::optional<Fault> in_range;
   for (std::size_t i = 0; i < node.children.size(); ++i) {
     const auto area = area_behind(node.children[i]);
-    if (area && !area->single() && !in_range) {
+    if (area && !area->single() && !in_range && !single) {
       if (const auto failing = document_.first_error(*area)) {
         in_range.emplace();
         in_range->origin = Fault::Origin::cell;
@@ -243,11 +273,16 @@ Result Evaluator::through_calc(const Node& node, Want want) {
         if (!tolerant) return of_fault(*in_range);
       }
     }
-    Result given = compute(node.children[i], Want::whole);
+    Result given =
+        single ? operand(node.children[i], want) : compute(node.children[i], Want::whole);
+    if (given.fault && counting) {
+      if (!hidden_) hidden_ = given.fault;
+      return unknown("uses " + node.word + " over an error");
+    }
     if (!given.usable()) return given;
     if (!given.value.hasValue() && i + 1 != node.children.size())
       return unknown("leaves out an argument of " + node.word);
-    argument[i] = given.value;
+    argument[i] = single ? given.value : for_calc(node.children[i], given.value);
   }
   if (!node.children.empty() && !argument[arguments.getLength() - 1].hasValue())
     arguments.realloc(arguments.getLength() - 1);

@@ -56,7 +56,7 @@ class Evaluator {
       : document_(document), context_(context), cell_(cell), formula_(formula), budget_(budget) {}
 
   // The value of the cell: of an array formula, the element that the cell shows.
-  [[nodiscard]] Result evaluate(const Node& root) { return element(root); }
+  [[nodiscard]] Result evaluate(const Node& root) { return operand(root, Want::element); }
 
   // The engine's words about the outermost Busbar calls that worked, in order of evaluation.
   [[nodiscard]] const std::vector<std::string>& explanations() const { return explanations_; }
@@ -68,7 +68,6 @@ class Evaluator {
   // `element` computes the one value that the cell shows, `whole` a value with all its rows.
   enum class Want { element, whole };
 
-  Result element(const Node& node) { return compute(node, Want::element); }
   Result compute(const Node& node, Want want);
   Result compute_kind(const Node& node, Want want);
   Result compute_reference(const Area& area, Want want);
@@ -81,6 +80,7 @@ class Evaluator {
   // An operand of an operator: a range stands for the cell in the same row or column.
   Result operand(const Node& node, Want want);
   Result truth(const Node& node, Want want, bool& holds);
+  Result branch(const Node& node, Want want);
   Result choose(const Node& node, Want want);
   Result condition_list(const Node& node, Want want);
   Result switch_list(const Node& node, Want want);
@@ -89,6 +89,7 @@ class Evaluator {
   Result position_of(const Node& node, Want want);
   Result index_into(const Node& node, Want want);
   Result through_calc(const Node& node, Want want);
+  com::sun::star::uno::Any for_calc(const Node& node, const com::sun::star::uno::Any& value);
 
   // The reference behind a node, through names; nothing when it is none.
   std::optional<Area> area_behind(const Node& node);

@@ -230,10 +230,10 @@ class Parser {
   }
 
   Node signs() {
-    bool negative = false;
+    int negatives = 0;
     while (next_ < tokens_.size()) {
       if (take(numbers_.negative)) {
-        negative = !negative;
+        ++negatives;
         continue;
       }
       const auto found = numbers_.binary.find(peek());
@@ -253,7 +253,10 @@ class Parser {
     }
     if (code >= 0 && (code == numbers_.range || code == numbers_.intersection))
       return fail("computes a range while it runs");
-    return negative ? wrapped(NodeKind::negative, node) : node;
+    // Two signs cancel, but still make a number of a text.
+    if (negatives > 0) node = wrapped(NodeKind::negative, node);
+    if (negatives > 0 && negatives % 2 == 0) node = wrapped(NodeKind::negative, node);
+    return node;
   }
 
   Node operand() {

@@ -27,20 +27,21 @@ class Argument:
     optional: bool
     ranges: dict  # unit set -> "bar, above 0, up to 1000"
 
+    def limit_texts(self, unit_set="metric"):
+        """(low, high, unit) as the catalogue prints them, "" where there is no limit."""
+        unit, _, text = self.ranges[unit_set].partition(", ")
+        low = re.match(r"(?:above |from )?(-?[\d.]+)", text)
+        high = re.search(r"to (-?[\d.]+)$", text)
+        return (
+            low[1] if low else "",
+            high[1] if high else "",
+            "" if unit in ("fraction", "any unit") else unit,
+        )
+
     def limits(self, unit_set="metric"):
         """(low, high, low itself is allowed) of a number; infinities where there is no limit."""
-        text = self.ranges[unit_set]
-        low, high, closed = float("-inf"), float("inf"), True
-        if match := re.search(r"(\S+) to (\S+)$", text):
-            low, high = float(match[1]), float(match[2])
-        else:
-            if "above 0" in text:
-                low, closed = 0.0, False
-            if match := re.search(r"from (\S+)", text):
-                low = float(match[1])
-            if match := re.search(r"up to (\S+)", text):
-                high = float(match[1])
-        return low, high, closed
+        low, high, _ = self.limit_texts(unit_set)
+        return float(low or "-inf"), float(high or "inf"), ", above " not in self.ranges[unit_set]
 
     def takes(self, number, unit_set="metric"):
         low, high, closed = self.limits(unit_set)

@@ -1,0 +1,419 @@
+"""Whatever a cell may hold, in every argument of every function: a Calc error, a WHY sentence that
+names function, argument and limit, and an office that lives on.
+
+The errors expected are those of the function reference: #N/A for a missing value, #VALUE! for a wrong
+kind, Err:502 for a zero or blank that cannot be and for what is out of range, Err:523 for an
+iteration at its cap. The limits are the ones that the catalogue states for each argument.
+"""
+
+import math
+
+import catalogue
+from catalogue import engine
+from harness.case import SheetCase
+
+GOOD_OPTIONS = {catalogue.NUMBER: "55", catalogue.OPTIONS: '"metric"'}
+
+# Cells that every test of the grid finds.
+INPUTS = {
+    "blank": ("AA1", None),
+    "empty text": ("AA2", '=""'),
+    "text": ("AA3", "abc"),
+    "logical": ("AA4", "=TRUE()"),
+    "error": ("AA5", "=1/0"),
+    "huge": ("AA6", 1e308),
+    "negative": ("AA7", -1),
+    "zero": ("AA8", 0),
+    "giant text": ("AA9", "x" * 60000),
+    "damaged stream": ("AA10", None),  # filled from a stream that Busbar wrote
+    "stream": ("AA11", "=STEAM(100;540;55)"),
+}
+NUMBERS = {"blank": 0.0, "logical": 1.0, "huge": 1e308, "negative": -1.0, "zero": 0.0}
+SET_APART = {"WHY", "WHY_CALL"}  # a reference, and any number of anything: tested by hand below
+WORKS = ""
+
+
+def place_inputs(document):
+    for address, content in INPUTS.values():
+        document.set(address, content)
+    stream = document.text("AA11")
+    document.set("AA10", stream[:40] + stream[41:])
+
+
+class Inputs(SheetCase):
+    """The grid: function x argument x input."""
+
+    def setUp(self):
+        super().setUp()
+        place_inputs(self.document)
+
+    def rows(self):
+        """(function, argument number, good arguments) of everything in the catalogue."""
+        for function in engine(self.oxt).functions:
+            if function.name in SET_APART:
+                continue
+            for address, content in function.given.items():
+                self.document.set(address, "=" + content)
+            good = function.example_arguments()
+            for index in range(len(function.arguments)):
+                yield function, index, good
+
+    def call(self, function, index, good, cell, last_option=None):
+        """The formula with one argument replaced; optional ones before it are filled."""
+        arguments = list(good)
+        wanted = max(index + 1, len(function.arguments) if last_option else 0)
+        while len(arguments) < wanted:
+            arguments.append(GOOD_OPTIONS[function.arguments[len(arguments)].kind])
+        arguments[index] = cell
+        if last_option:
+            arguments[-1] = f'"{last_option}"'
+        return f"={function.name}({';'.join(arguments)})"
+
+    def check(self, function, index, formula, allowed, words):
+        """The formula shows one of the errors allowed, and WHY holds every one of the words."""
+        self.document.set_all({"F9": formula, "G9": "=WHY(F9)"})
+        shown, why = self.document.error("F9"), self.document.text("G9")
+        self.assertIn(shown, allowed, f"{formula}: {why}")
+        self.assertEqual(self.document.error("G9"), "", formula)
+        self.assertLess(len(why), 4100)
+        for unwanted in ("defect", "cannot take", "finds no part", "{0}", "{1}", "nan", "inf "):
+            self.assertNotIn(unwanted, why, formula)
+        if shown != WORKS:
+            for word in words:
+                self.assertIn(word, why, formula)
+        return shown, why
+
+    def expectation(self, function, argument, name):
+        """(errors that may be shown, words that WHY must hold if one is shown)"""
+        who = f"F9: {function.name}: {argument.name} "
+        if name == "error":
+            return {"#DIV/0!"}, ["F9 passes on the error of AA5: #DIV/0!"]
+        if name == "empty text":
+            return {"#N/A"} if argument.kind != catalogue.OPTIONS else {"#N/A"}, [who]
+        kind = argument.kind
+        if kind in (catalogue.NUMBER, catalogue.NUMBERS):
+            if name not in NUMBERS:
+                return {"#VALUE!"}, [who, "is a text where a number is needed"]
+            number = NUMBERS[name]
+            if argument.takes(number):
+                # Inside its own limits; other arguments may still make it impossible.
+                return {WORKS, "Err:502", "#N/A"}, [f"F9: {function.name}: "]
+            return {"Err:502"}, [who, self.limit_words(argument, number)]
+        if kind in (catalogue.STREAM, catalogue.STREAMS):
+            if name in ("blank", "zero"):
+                return {"Err:502"}, [who, "zero or blank where a stream is needed"]
+            if name == "stream":
+                return {WORKS, "Err:502", "#N/A"}, [f"F9: {function.name}: "]
+            if name in NUMBERS:
+                return {"#VALUE!"}, [who, "is a number where a stream is needed"]
+            return {"#VALUE!"}, [who, "damaged" if name == "damaged stream" else "text of a stream"]
+        if kind == catalogue.OPTIONS:
+            if name in ("blank", "zero"):
+                return {"Err:502"}, [who, "zero or blank", '"metric", "us" or "si"']
+            return {"#VALUE!"}, [who, '"metric", "us" or "si"']
+        self.assertEqual(kind, catalogue.WORD)
+        if name in ("blank", "zero"):
+            return {"Err:502"}, [who, "zero or blank where a word is needed"]
+        if name in NUMBERS:
+            return {"#VALUE!"}, [who, "is a number where a word is needed"]
+        if argument.name == "tag":
+            return {WORKS, "#VALUE!"}, [who]  # almost any short text is a plant code
+        return {"#VALUE!"}, [who]
+
+    @staticmethod
+    def limit_words(argument, number, unit_set="metric"):
+        low, high, unit = argument.limit_texts(unit_set)
+        if number > argument.limits(unit_set)[1]:
+            return f"above {high} {unit}".strip()
+        if not argument.limits(unit_set)[2]:
+            if number == 0:
+                return "zero or blank"
+            return "not above zero" if low == "0" else f"not above {low} {unit}"
+        return f"below {low} {unit}".strip()
+
+    def test_every_input_in_every_argument(self):
+        cells = 0
+        for function, index, good in self.rows():
+            argument = function.arguments[index]
+            for name, (address, _) in INPUTS.items():
+                with self.subTest(function=function.name, argument=argument.name, input=name):
+                    allowed, words = self.expectation(function, argument, name)
+                    formula = self.call(function, index, good, address)
+                    self.check(function, index, formula, allowed, words)
+                cells += 1
+        self.assertGreater(cells, 1000)
+        self.assertTrue(self.office.alive())
+
+    def test_limits_are_told_in_the_units_of_the_caller(self):
+        told = 0
+        for function, index, good in self.rows():
+            argument = function.arguments[index]
+            if argument.kind not in (catalogue.NUMBER, catalogue.NUMBERS):
+                continue
+            for unit_set in ("us", "si") if function.has_options else ():
+                low, high, _ = argument.limits(unit_set)
+                for number in (high * 1.01 + 1, low - abs(low) * 0.01 - 1):
+                    if not math.isfinite(number) or argument.takes(number, unit_set):
+                        continue
+                    with self.subTest(function=function.name, argument=argument.name, set=unit_set):
+                        words = [argument.name, self.limit_words(argument, number, unit_set)]
+                        formula = self.call(function, index, good, repr(number), unit_set)
+                        self.check(function, index, formula, {"Err:502"}, words)
+                    told += 1
+        self.assertGreater(told, 60)
+
+    def test_left_out_arguments(self):
+        for function, index, good in self.rows():
+            argument = function.arguments[index]
+            if index >= len(good):
+                continue
+            with self.subTest(function=function.name, argument=argument.name):
+                # A gap in the middle, then everything from there on missing.
+                gap = self.call(function, index, good, "")
+                cut = f"={function.name}({';'.join(good[:index])})"
+                for formula in (gap, cut) if index else (gap,):
+                    allowed = {WORKS} if argument.optional else {"#N/A"}
+                    self.check(function, index, formula, allowed, [argument.name, "is left out"])
+
+    def test_optional_arguments_make_no_difference_when_left_out(self):
+        for function, index, good in self.rows():
+            if function.arguments[index].kind != catalogue.OPTIONS:
+                continue
+            with self.subTest(function=function.name):
+                short = f"={function.name}({';'.join(good)})"
+                gaps = [""] * (index - len(good))
+                for rest in (gaps + [""], gaps + ['"metric"'], gaps + ['" METRIC "']):
+                    self.document.set_all({"F1": short, "F2": f"={function.name}({';'.join([*good, *rest])})"})
+                    self.assertEqual(self.document.content("F2"), self.document.content("F1"))
+
+    def test_too_many_arguments(self):
+        for function, index, good in self.rows():
+            if index:
+                continue
+            with self.subTest(function=function.name):
+                # Calc itself refuses them; WHY says how many there may be.
+                full = list(good)
+                while len(full) < len(function.arguments):
+                    full.append(GOOD_OPTIONS[function.arguments[len(full)].kind])
+                formula = f"={function.name}({';'.join([*full, '1'])})"
+                shown, why = self.check(function, 0, formula, {"Err:504", "#VALUE!"}, [])
+                self.assertTrue(why.startswith(f"F9: {function.name}: takes "), why)
+                self.assertIn(str(len(full)), why)
+
+    def test_no_arguments_at_all(self):
+        for function, index, good in self.rows():
+            if index == 0:
+                with self.subTest(function=function.name):
+                    formula = f"={function.name}()"
+                    words = [f"F9: {function.name}: {function.arguments[0].name} is left out"]
+                    self.check(function, 0, formula, {"#N/A"}, words)
+
+
+class Kinds(SheetCase):
+    """Cells of every kind that a user may point to."""
+
+    def test_digits_in_a_text_cell_are_no_number(self):
+        # Imported tables are full of them; Calc's own arithmetic would take them for numbers.
+        self.document.set_all({"A1": "100", "B1": "=STEAM_ENTHALPY(A1;540)"})
+        self.assert_error("B1", "#VALUE!")
+        self.assertIn('pressure "100" is a text', self.why("B1"))
+        self.document.set("B2", "=STEAM_ENTHALPY(VALUE(A1);540)")
+        self.assert_error("B2", "")
+
+    def test_percentages_and_dates_are_their_numbers(self):
+        self.document.set_all({"A1": "=88%", "A2": "=DATE(2020;1;1)", "A3": "=TIME(12;0;0)"})
+        self.document.set_all(
+            {
+                "B1": "=TURBINE_OUT(STEAM(100;540);0.05;A1)",
+                "C1": "=TURBINE_OUT(STEAM(100;540);0.05;0.88)",
+                "B2": "=STEAM(A2;540)",
+                "B3": "=STEAM_AT_DRYNESS(1;A3)",
+                "C3": "=STEAM_AT_DRYNESS(1;0.5)",
+            }
+        )
+        self.assertEqual(self.document.text("B1"), self.document.text("C1"))
+        self.assertEqual(self.document.text("B3"), self.document.text("C3"))
+        self.assert_error("B2", "Err:502")
+        self.assertIn("pressure 43831 bar is above 1000 bar", self.why("B2"))
+
+    def test_every_error_goes_through(self):
+        for formula, shown in {
+            "=1/0": "#DIV/0!",
+            "=NA()": "#N/A",
+            '="a"+1': "#VALUE!",
+            "=SQRT(-1)": "Err:502",
+            "=NOSUCHNAME": "#NAME?",
+        }.items():
+            with self.subTest(formula):
+                self.document.set_all({"A1": formula, "B1": "=STEAM(A1;540)", "B2": "=ENTHALPY_OF(B1)"})
+                self.assert_error("B1", shown)
+                self.assert_error("B2", shown)
+                self.assertTrue(self.why("B2").startswith("B2 passes on the error of A1: "))
+
+    def test_a_sum_over_a_failure_breaks(self):
+        self.document.set_all({"A1": "=STEAM_ENTHALPY(100;540)", "A2": "=STEAM_ENTHALPY(2000;540)"})
+        self.document.set("A3", "=SUM(A1:A2)")
+        self.assert_error("A3", "Err:502")
+
+    def test_no_convergence_is_told_apart(self):
+        # Err:523 from Calc's own iteration goes through as it is.
+        self.document.model.IsIterationEnabled = True
+        self.document.model.IterationCount = 3
+        self.document.set_all({"A1": "=A2+1", "A2": "=A1+1", "B1": "=STEAM(A1;540)"})
+        self.assert_error("B1", "Err:523")
+
+
+class Ranges(SheetCase):
+    """Ranges in the place of single cells, and the other way round."""
+
+    def test_no_implicit_intersection(self):
+        # A plain formula beside a range gives the first element, not the one in its own row: a
+        # range always means the whole range.
+        self.document.fill("A1", [(100.0,), (50.0,), (10.0,)])
+        self.document.set_all({"B2": "=STEAM_ENTHALPY(A1:A3;540)", "C2": "=STEAM_ENTHALPY(A1;540)"})
+        self.assertEqual(self.document.value("B2"), self.document.value("C2"))
+
+    def test_a_single_cell_is_a_range_of_one(self):
+        self.document.set_all({"A1": 0.9, "B1": "=EFFICIENCY_CHAIN(A1)", "B2": "=EFFICIENCY_CHAIN(A1:A1)"})
+        self.assertEqual(self.document.value("B1"), 0.9)
+        self.assertEqual(self.document.value("B2"), 0.9)
+        self.document.set_all({"A2": "=STEAM(10;300;5)", "B3": "=FLOW_OF(MIX_OUT(A2))"})
+        self.assertEqual(self.document.value("B3"), 5)
+
+    def test_blank_and_empty_cells_of_a_range_are_missing(self):
+        self.document.fill("A1", [(0.9,), ("",), (0.8,)])
+        self.document.set("B1", "=EFFICIENCY_CHAIN(A1:A3)")
+        self.assert_error("B1", "#N/A")
+        self.assertIn("links in row 2, column 1 of its range is blank", self.why("B1"))
+        self.document.set_all({"C1": "=STEAM(10;300;5)", "C3": "=STEAM(10;200;3)", "D1": "=MIX_OUT(C1:C3)"})
+        self.assert_error("D1", "#N/A")
+        self.assertIn("streams in row 2, column 1 of its range is blank", self.why("D1"))
+
+    def test_the_failing_cell_of_a_range_is_named(self):
+        self.document.fill("A1", [(0.9, 0.95), (88.0, 0.8)])
+        self.document.set("D1", "=EFFICIENCY_CHAIN(A1:B2)")
+        self.assert_error("D1", "Err:502")
+        self.assertIn("links in row 2, column 1 of its range 88 is above 1", self.why("D1"))
+
+    def test_whole_columns(self):
+        self.document.set_all({"A1": 100, "A2": 50})
+        for formula in (
+            "=STEAM_ENTHALPY(A:A;540)",  # numbers, one by one
+            "=EFFICIENCY_CHAIN(A:A)",  # numbers, all at once
+            "=MIX_OUT(A:A)",  # streams, all at once
+            '=CONVERT_UNIT(1;A:A;"psi")',  # words
+            "=STEAM(100;540;;A:A)",  # options
+        ):
+            with self.subTest(formula):
+                self.document.set_all({"D1": formula, "E1": "=WHY(D1)"})
+                self.document.text("D1")
+                self.assertTrue(self.document.text("E1").startswith("D1"))
+        self.document.set_array("F1", "=SUM(IFERROR(STEAM_ENTHALPY(A1:A1048576;540);0))")
+        self.document.set_all({"G1": "=STEAM_ENTHALPY(100;540)+STEAM_ENTHALPY(50;540)"})
+        self.assertEqual(self.document.value("F1"), self.document.value("G1"))
+
+    def test_a_range_larger_than_one_call_takes(self):
+        # A million rows by eight columns is more than the engine's limit on cells.
+        self.document.set_all({"A1": "=EFFICIENCY_CHAIN(B1:CA1048576)", "A2": "=WHY(A1)"})
+        self.assertTrue(self.document.error("A1"))
+        self.assertTrue(self.document.text("A2").startswith("A1"))
+
+    def test_unions_and_ragged_arrays(self):
+        self.document.set_all({"A1": 100, "A2": 50})
+        for formula in ("=STEAM_ENTHALPY(A1~A2;540)", "=EFFICIENCY_CHAIN({0.9;0.8|0.7})"):
+            with self.subTest(formula):
+                self.document.set("B1", formula)
+                self.assertTrue(self.document.error("B1"))
+                self.assertTrue(self.why("B1").startswith("B1"))
+
+    def test_ranges_over_sheets(self):
+        self.document.add_sheet("Second")
+        self.document.set_all({"A1": 0.9, "Second.A1": 0.8})
+        self.document.set("C1", "=EFFICIENCY_CHAIN(Sheet1.A1:Second.A1)")
+        self.document.text("C1")
+        self.assertTrue(self.why("C1").startswith("C1"))
+
+
+class Mistakes(SheetCase):
+    """What somebody types who has never seen Busbar, and what he is told."""
+
+    def assert_told(self, formula, shown, *words):
+        with self.subTest(formula):
+            self.document.set("B2", formula)
+            self.assert_error("B2", shown)
+            answer = self.why("B2")
+            for word in words:
+                self.assertIn(word, answer)
+
+    def test_percentages_for_fractions(self):
+        self.assert_told("=TURBINE_OUT(STEAM(100;540);0.05;88)", "Err:502", "isentropic efficiency 88", "a fraction is meant, 0.88")
+        self.assert_told("=HEAT_RATE(38)", "Err:502", "efficiency 38 is above 1", "0.38")
+        self.assert_told("=STEAM_AT_DRYNESS(0.05;88)", "Err:502", "dryness 88", "0.88")
+        self.assert_told('=EFFICIENCY_ON_BASIS(55;"LHV";"HHV";55.5;50)', "Err:502", "0.55")
+
+    def test_gauge_for_absolute_pressure(self):
+        self.assert_told("=STEAM(-0.95;33)", "Err:502", "pressure -0.95 bar is not above zero", "ABSOLUTE_PRESSURE")
+        self.assert_told("=ABSOLUTE_PRESSURE(99)", "#N/A", "ambient is left out")
+        self.assert_told("=ABSOLUTE_PRESSURE(99;1013)", "Err:502", "ambient 1013 bar is above 1.1 bar")
+        self.assert_told('=CONVERT_UNIT(100;"barg";"bar")', "#VALUE!", "ABSOLUTE_PRESSURE")
+
+    def test_kelvin_fahrenheit_and_pascal_under_metric(self):
+        self.assert_told("=STEAM(10000000;813.15)", "Err:502", "pressure 10000000 bar is above 1000 bar")
+        self.assert_told("=STEAM(100;-459)", "Err:502", "temperature -459 °C is below 0 °C")
+        self.assert_told("=SATURATION_PRESSURE(453.15)", "Err:502", "temperature 453.15 °C is above 373.946 °C")
+        self.assert_told('=STEAM(100;27;;"si")', "Err:502", "temperature 27 K is below 273.15 K")
+
+    def test_unit_set_in_the_wrong_place(self):
+        # The commonest slip of all: the gap for the flow is forgotten.
+        self.assert_told('=STEAM(1450;1004;"us")', "#VALUE!", 'flow "us"', "options")
+        self.assert_told('=STEAM(100;540;;"imperial")', "#VALUE!", 'options "imperial"', '"us"')
+        self.assert_told('=STEAM(100;540;;"bar")', "#VALUE!", 'options "bar"')
+
+    def test_streams_and_numbers_mixed_up(self):
+        self.assert_told("=STEAM_ENTHALPY(STEAM(100;540);540)", "#VALUE!", "pressure", "a number is needed")
+        self.assert_told("=ENTHALPY_OF(100)", "#VALUE!", "stream is a number where a stream is needed")
+        self.assert_told("=TURBINE_OUT(100;0.05;0.88)", "#VALUE!", "inlet is a number where a stream")
+        self.assert_told("=TURBINE_OUT(STEAM(100;540);STEAM(0.05;33);0.88)", "#VALUE!", "outlet pressure")
+        self.assert_told('=ENTHALPY_OF("steam at 100 bar")', "#VALUE!", "not the text of a stream")
+
+    def test_separators(self):
+        # A decimal comma in a point locale is a further argument.
+        self.assert_told("=STEAM_ENTHALPY(100;540,5)", "#VALUE!", "options")
+        self.assert_told("=CARNOT(540,5;30)", "Err:502", "cold temperature")
+        self.assert_told('=STEAM("100,5";540)', "#VALUE!", 'pressure "100,5"')
+
+    def test_bases_and_boundaries(self):
+        self.assert_told('=EFFICIENCY_ON_BASIS(0.38;"net";"gross";30;28)', "#VALUE!", 'from basis "net"', "boundary")
+        self.assert_told('=EFFICIENCY_ON_BASIS(0.38;"HHV";"LHV";28;30)', "Err:502", "lower heating value 30", "28")
+        self.assert_told("=EFFICIENCY_ON_BASIS(0.38)", "#N/A", "from basis is left out")
+        self.assert_told("=NET_POWER(100;0)", "Err:502", "auxiliary power is zero or blank")
+
+    def test_ends_swapped(self):
+        self.assert_told("=CARNOT(30;540)", "Err:502", "cold temperature 540 °C is not below the hot temperature 30 °C")
+        self.assert_told("=TURBINE_OUT(STEAM(10;300);100;0.88)", "Err:502", "outlet pressure 100 bar", "10 bar")
+        self.assert_told("=PUMP_OUT(STEAM(100;540);120;0.8)", "Err:502", "inlet", "steam")
+        self.assert_told("=STEAM(540;100000)", "Err:502", "temperature 100000 °C")
+
+    def test_flows_forgotten(self):
+        self.assert_told("=FLUID_POWER(STEAM(100;540);STEAM(10;300))", "#N/A", "inlet carries no flow", "SET_FLOW")
+        self.assert_told("=STEAM(100;540;0)", "Err:502", "flow is zero or blank")
+        self.assert_told("=FLUID_POWER(STEAM(100;540;5);STEAM(10;300;6))", "Err:502", "6 kg/s", "5 kg/s")
+
+    def test_units_misspelt(self):
+        self.assert_told('=CONVERT_UNIT(100;"bar";"kW")', "#VALUE!", 'to "kW"')
+        self.assert_told('=CONVERT_UNIT(100;"brr";"psi")', "#VALUE!", 'from "brr"')
+        self.assert_told('=PUBLISHED_SOURCE("STEEM")', "#VALUE!", "STEEM")
+        self.assert_told('=WHY_CALL("STEEM";1)', "#VALUE!", "STEEM")
+
+    def test_a_list_of_links_instead_of_a_range(self):
+        self.assert_told("=EFFICIENCY_CHAIN(0.9;0.8)", "Err:504", "EFFICIENCY_CHAIN", "range")
+
+    def test_names_misspelt(self):
+        self.assert_told("=STEEM(100;540)", "#NAME?", "does not know")
+
+    def test_why_of_no_cell(self):
+        for formula in ("=WHY()", "=WHY(5)", "=WHY(STEAM(1;2))", '=WHY("A1")', "=WHY(A1:B2)", "=WHY(A1;A2)"):
+            with self.subTest(formula):
+                self.document.set("B2", formula)
+                self.assertTrue(self.document.error("B2") or "range" in self.document.text("B2"))
+        self.assertTrue(self.office.alive())
