@@ -1,9 +1,11 @@
 // Calls through the C interface.
+#include <algorithm>
 #include <array>
 #include <vector>
 
 #include "abi/boundary.hpp"
 #include "catalogue/call.hpp"
+#include "core/text.hpp"
 #include "functions/functions.hpp"
 
 namespace busbar::abi {
@@ -81,7 +83,7 @@ int32_t busbar_call_by_name(const char* name, size_t length, const busbar_value*
   if (function != nullptr) return busbar_call(function, arguments, count, result);
   return answer(arguments, count, result, [&](Arguments) {
     std::string word =
-        name == nullptr ? std::string() : std::string(name, length < 60 ? length : 60);
+        name == nullptr ? std::string() : quotable({name, std::min<size_t>(length, kTextLimit)});
     return Grid(Error({{Fault::unknown_word, 0, "is not a function of Busbar"},
                        nullptr,
                        UnitSet::metric,

@@ -9,14 +9,7 @@
 namespace busbar {
 namespace {
 
-constexpr std::size_t kQuoted = 60;
 constexpr double kHundredPercent = 100;
-
-std::string quoted(std::string_view text) {
-  std::string word(text.substr(0, prefix_at_boundary(text, kQuoted)));
-  if (word.size() < text.size()) word += "…";
-  return word;
-}
 
 std::uint8_t position(std::size_t index) { return static_cast<std::uint8_t>(index + 1); }
 
@@ -30,7 +23,7 @@ Trouble not_a(const char* needed_but_text, const char* needed_but_logical, std::
   if (std::holds_alternative<Blank>(cell)) return trouble(Fault::missing, index, "is blank");
   if (const auto* text = std::get_if<std::string>(&cell)) {
     if (text->empty()) return trouble(Fault::missing, index, "is empty");
-    return trouble(Fault::wrong_kind, index, needed_but_text, quoted(*text));
+    return trouble(Fault::wrong_kind, index, needed_but_text, quotable(*text));
   }
   if (const auto* error = std::get_if<Error>(&cell)) {
     const Problem& inner = error->problem();
@@ -106,7 +99,7 @@ Trouble read_stream_cell(std::size_t index, const Cell& cell, std::optional<Stre
   }
   const Outcome<Stream> read = read_stream(*text);
   if (!read) {
-    return {read.failure().about(position(index)), quoted(*text)};
+    return {read.failure().about(position(index)), quotable(*text)};
   }
   stream = *read;
   return {};

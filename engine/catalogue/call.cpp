@@ -6,6 +6,7 @@
 #include "catalogue/arguments.hpp"
 #include "catalogue/options.hpp"
 #include "catalogue/sentence.hpp"
+#include "core/text.hpp"
 #include "stream/text.hpp"
 
 namespace busbar {
@@ -212,7 +213,7 @@ class Caller {
     Trouble found{failure, {}};
     const std::size_t index = failure.argument;
     if (index > 0 && index <= row_.types.size() && row_.types[index - 1].kind == Kind::word) {
-      found.word = slots_[index - 1].word();
+      found.word = quotable(slots_[index - 1].word());
     }
     return found;
   }

@@ -13,12 +13,12 @@ Outcome<Options> read_options(std::string_view text, std::string& word) {
     const std::string_view part = trimmed(left.substr(0, separator));
     const auto set = unit_set_named(part);
     if (!set) {
-      word = part;
+      word = quotable(part);
       return Failure{Fault::unknown_word, 1,
                      "is not a unit set; write \"metric\", \"us\" or \"si\""};
     }
     if (units_seen) {
-      word = part;
+      word = quotable(part);
       return Failure{Fault::unknown_word, 1, "names a second unit set"};
     }
     units_seen = true;

@@ -14,6 +14,7 @@ constexpr std::array<double, 16> kPowers{1e0, 1e1, 1e2,  1e3,  1e4,  1e5,  1e6, 
                                          1e8, 1e9, 1e10, 1e11, 1e12, 1e13, 1e14, 1e15};
 constexpr double kLeastPlain = 1e-4;
 constexpr int kMostDecimals = 15;
+constexpr std::size_t kMostQuoted = 60;
 
 char lower(char c) { return c >= 'A' && c <= 'Z' ? static_cast<char>(c - 'A' + 'a') : c; }
 
@@ -126,6 +127,17 @@ bool is_printable_utf8(std::string_view text) {
     i += following + 1;
   }
   return true;
+}
+
+std::string quotable(std::string_view text) {
+  std::string quote(text.substr(0, prefix_at_boundary(text, kMostQuoted)));
+  if (!is_printable_utf8(quote)) {
+    for (char& c : quote) {
+      if (c < ' ' || c > '~') c = '?';
+    }
+  }
+  if (quote.size() < text.size()) quote += "…";
+  return quote;
 }
 
 }  // namespace busbar

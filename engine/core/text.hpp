@@ -30,4 +30,8 @@ std::size_t prefix_at_boundary(std::string_view text, std::size_t limit);
 /// True when the text is well-formed UTF-8 without control characters.
 bool is_printable_utf8(std::string_view text);
 
+/// The beginning of a user's text as a sentence may quote it: at most 60 bytes, "…" where it was
+/// cut, and "?" for every byte of a text that is not printable UTF-8.
+std::string quotable(std::string_view text);
+
 }  // namespace busbar
