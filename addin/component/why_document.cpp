@@ -212,8 +212,12 @@ std::optional<Address> SheetDocument::first_error(const Area& area) const {
   std::optional<Address> first;
   if (!found.is()) return first;
   for (const CellRangeAddress& part : found->getRangeAddresses()) {
-    const Address start{part.Sheet, part.StartRow, part.StartColumn};
-    if (!first || start < *first) first = start;
+    // Calc also names cells beside a range that lies beyond the last column in use.
+    const Address start{part.Sheet, std::max(part.StartRow, area.first.row),
+                        std::max(part.StartColumn, area.first.column)};
+    const bool inside = start.row <= std::min(part.EndRow, area.last_row) &&
+                        start.column <= std::min(part.EndColumn, area.last_column);
+    if (inside && (!first || start < *first)) first = start;
   }
   return first;
 }

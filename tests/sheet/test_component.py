@@ -390,8 +390,12 @@ class Why(SheetCase):
         self.assert_error("B7", "#VALUE!")
         self.assertLess(len(self.why("B7")), 4100)
         self.document.set("B8", "=EFFICIENCY_CHAIN(D:D)")
-        self.document.text("B8")
-        self.assertTrue(self.why("B8").startswith("B8"))
+        self.assert_error("B8", "#N/A")
+        self.assertTrue(self.why("B8").startswith("B8: EFFICIENCY_CHAIN"), self.why("B8"))
+
+    def test_a_range_beyond_the_cells_in_use(self):
+        self.document.set("B8", "=EFFICIENCY_CHAIN(C1:C9)")
+        self.assertTrue(self.why("B8").startswith("B8: EFFICIENCY_CHAIN"), self.why("B8"))
 
     def test_many_operands(self):
         self.document.set("B7", "=STEAM(2000" + "+0" * 2000 + ";540)")
