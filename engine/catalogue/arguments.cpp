@@ -40,6 +40,17 @@ Failure against_limit(Fault fault, std::uint8_t at, const char* reason, Measure 
   return failure;
 }
 
+// The zero of a temperature is the absolute one, which is no zero in °C; a negative pressure is
+// most often a gauge reading.
+const char* not_above_zero(Quantity quantity) {
+  if (quantity == Quantity::temperature) return "{0} is not above {1}";
+  if (quantity == Quantity::pressure) {
+    return "{0} is not above zero: pressures are absolute here, see ABSOLUTE_PRESSURE for a gauge "
+           "reading and ABSOLUTE_FROM_VACUUM for a vacuum";
+  }
+  return "{0} is not above zero";
+}
+
 // A zero that is out of range may be a blank cell: Calc hands both over as 0.
 Failure outside(std::size_t index, const Argument& argument, Quantity quantity, double number,
                 double si) {
@@ -48,7 +59,7 @@ Failure outside(std::size_t index, const Argument& argument, Quantity quantity, 
   if (si < argument.low) {
     if (argument.low == kAboveZero) {
       if (number == 0) return {Fault::zero_or_blank, at, "is zero or blank"};
-      return {Fault::outside_range, at, "{0} is not above zero", {{value}}};
+      return {Fault::outside_range, at, not_above_zero(quantity), {{value, {0, quantity}}}};
     }
     const Measure limit{argument.low, quantity};
     if (number == 0) {
@@ -58,6 +69,8 @@ Failure outside(std::size_t index, const Argument& argument, Quantity quantity, 
     return against_limit(Fault::outside_range, at, "{0} is below {1}", value, limit);
   }
   const Measure limit{argument.high, quantity};
+  // 1e308 bar is more pascal than a double holds.
+  if (std::isinf(si)) return against_limit(Fault::outside_range, at, "is above {1}", value, limit);
   if (quantity == Quantity::fraction && si <= kHundredPercent) {
     const Measure meant{si / kHundredPercent, quantity};
     return {Fault::outside_range,

@@ -68,17 +68,44 @@ class Caller {
   }
 
   Trouble prepare() {
-    if (arguments_.size() > row_.argument_count() && !has_rest()) {
-      return {{Fault::wrong_shape,
-               0,
-               "takes {0} arguments at the most; {1} were given",
-               {{{static_cast<double>(row_.argument_count()), Quantity::number},
-                 {static_cast<double>(arguments_.size()), Quantity::number}}}},
-              {}};
-    }
+    if (arguments_.size() > row_.argument_count() && !has_rest()) return too_many();
     if (Trouble found = read_units()) return found;
     for (std::size_t i = 0; i < row_.arguments.size(); ++i) {
-      if (Trouble found = read_constant(i)) return found;
+      if (Trouble found = read_constant(i)) {
+        Trouble cause = misplaced_units();
+        return cause ? cause : found;
+      }
+    }
+    return {};
+  }
+
+  [[nodiscard]] Trouble too_many() const {
+    const Measure most{static_cast<double>(row_.argument_count()), Quantity::number};
+    const Measure given{static_cast<double>(arguments_.size()), Quantity::number};
+    const char* reason = "takes {0} arguments at the most; {1} were given";
+    if (row_.argument_count() == 1) reason = "takes one argument; {1} were given";
+    if (!row_.types.empty()) {
+      const Kind first = row_.types.front().kind;
+      if (first == Kind::numbers || first == Kind::streams) {
+        reason = "takes one range, not a list of {1} arguments";
+      }
+    }
+    return {{Fault::wrong_shape, 0, reason, {{most, given}}}, {}};
+  }
+
+  // The unit set in the place of a number: the gap for an argument that was left out is missing,
+  // and whatever else fails was read in the wrong units.
+  [[nodiscard]] Trouble misplaced_units() const {
+    if (!row_.has_options || given(row_.arguments.size()) != nullptr) return {};
+    for (std::size_t i = 0; i < row_.arguments.size(); ++i) {
+      const Grid* grid = given(i);
+      if (grid == nullptr || !grid->is_single() || row_.types[i].kind != Kind::number) continue;
+      const auto* text = std::get_if<std::string>(&grid->at(0, 0));
+      if (text == nullptr || !unit_set_named(trimmed(*text))) continue;
+      return {{Fault::wrong_kind, static_cast<std::uint8_t>(i + 1),
+               "is a unit set where a number is needed; it belongs in options, the last argument: "
+               "write an empty argument (;;) for each one that is left out before it"},
+              *text};
     }
     return {};
   }

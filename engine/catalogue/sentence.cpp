@@ -117,7 +117,9 @@ std::string describe_range(const Row& row, std::size_t argument, UnitSet units) 
   if (!below && !above) return text;
   if (!text.empty()) text += ", ";
   if (words.low == kAboveZero) {
-    text += above ? "above 0, up to " + limit(words.high) : "above 0";
+    // In °C and °F the absolute zero is not 0.
+    text += "above " + limit(0);
+    if (above) text += ", up to " + limit(words.high);
   } else if (below && above) {
     text += limit(words.low) + " to " + limit(words.high);
   } else if (below) {
