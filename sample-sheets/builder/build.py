@@ -1,0 +1,43 @@
+#!/usr/bin/python3
+"""Builds the sample workbooks anew with the extension: build.py busbar.oxt [--out FOLDER]
+
+Needs the Python of LibreOffice's UNO bridge (Debian: /usr/bin/python3 with python3-uno).
+"""
+
+import argparse
+import os
+import sys
+
+HERE = os.path.dirname(os.path.abspath(__file__))
+SAMPLES = os.path.dirname(HERE)
+sys.path[:0] = [HERE, os.path.join(os.path.dirname(SAMPLES), "tests", "sheet")]
+
+from harness.office import Office  # noqa: E402
+from harness.profile import Profile  # noqa: E402
+
+import supplier_check  # noqa: E402
+
+WORKBOOKS = (supplier_check,)
+
+
+def main():
+    parser = argparse.ArgumentParser(description="builds the sample workbooks")
+    parser.add_argument("oxt", help="the extension whose functions the workbooks use")
+    parser.add_argument("--out", default=SAMPLES, metavar="FOLDER", help="where they go")
+    parser.add_argument("--profile", metavar="FOLDER", help="a profile that has the extension already")
+    given = parser.parse_args()
+    os.makedirs(given.out, exist_ok=True)
+    with Profile(given.profile) as profile:
+        if not given.profile:
+            profile.with_extension(given.oxt)
+        with Office(profile.folder) as office:
+            for workbook in WORKBOOKS:
+                path = os.path.join(given.out, workbook.FILE)
+                with office.new() as document:
+                    workbook.build(document)
+                    document.save(path)
+                print(path)
+
+
+if __name__ == "__main__":
+    main()
