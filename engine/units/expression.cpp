@@ -75,6 +75,7 @@ class Reader {
 
   bool factor(Expression& unit, int depth) {
     if (take("(")) {
+      skip_spaces();
       if (!quotient(unit, depth + 1)) return false;
       skip_spaces();
       if (!take(")")) return false;
