@@ -70,7 +70,10 @@ def _box(color, width):
 
 # name: (parent, properties)
 CELL_STYLES = {
-    "text": ("Default", {"CharHeight": 9.0, "CharColor": INK}),
+    "text": (
+        "Default",
+        {"CharHeight": 9.0, "CharColor": INK, "ParaLeftMargin": 90, "ParaRightMargin": 90},
+    ),
     "title": ("text", {"CharHeight": 18.0, "CharWeight": BOLD, "CharColor": SLATE}),
     "subtitle": ("text", {"CharHeight": 10.0}),
     "block": (
@@ -87,8 +90,8 @@ CELL_STYLES = {
             **_box(HAIR, 9),
         },
     ),
-    "heading left": ("heading", {"HoriJustify": LEFT, "ParaIndent": 60}),
-    "label": ("text", {"HoriJustify": LEFT, "ShrinkToFit": True, "ParaIndent": 60, **_box(HAIR, 9)}),
+    "heading left": ("heading", {"HoriJustify": LEFT}),
+    "label": ("text", {"HoriJustify": LEFT, "ShrinkToFit": True, **_box(HAIR, 9)}),
     "label wrapped": ("label", {"ShrinkToFit": False, "IsTextWrapped": True}),
     "input": (
         "text",
@@ -96,17 +99,16 @@ CELL_STYLES = {
             "CellBackColor": SAND,
             "HoriJustify": RIGHT,
             "ShrinkToFit": True,
-            "ParaIndent": 60,
             **_box(OCHRE, 26),
             "LeftBorder": _line(OCHRE, 71),
         },
     ),
-    "input text": ("input", {"HoriJustify": CENTER, "ParaIndent": 0}),
+    "input text": ("input", {"HoriJustify": CENTER}),
     "input left": ("input", {"HoriJustify": LEFT}),
     "allowance": ("input", {"CellBackColor": WHITE, "CharPosture": ITALIC}),
-    "result": ("text", {"HoriJustify": RIGHT, "ShrinkToFit": True, "ParaIndent": 60, **_box(HAIR, 9)}),
+    "result": ("text", {"HoriJustify": RIGHT, "ShrinkToFit": True, **_box(HAIR, 9)}),
     "result text": ("result", {"HoriJustify": LEFT}),
-    "result centred": ("result", {"HoriJustify": CENTER, "ParaIndent": 0}),
+    "result centred": ("result", {"HoriJustify": CENTER}),
     "key": ("result", {"CharWeight": BOLD}),
     "key centred": ("key", {"HoriJustify": CENTER}),
     "stream": ("result", {"HoriJustify": LEFT, "CharHeight": 8.0, "ShrinkToFit": False}),
@@ -121,7 +123,6 @@ CELL_STYLES = {
             "IsTextWrapped": True,
             "HoriJustify": LEFT,
             "VertJustify": TOP,
-            "ParaIndent": 60,
             "CharPosture": ITALIC,
         },
     ),
@@ -132,26 +133,25 @@ CELL_STYLES = {
             "IsTextWrapped": True,
             "HoriJustify": LEFT,
             "VertJustify": MIDDLE,
-            "ParaIndent": 60,
             "CellBackColor": MIST,
             **_box(SLATE, 53),
         },
     ),
-    "reason": ("text", {"CharHeight": 8.5, "IsTextWrapped": True, "HoriJustify": LEFT, "ParaIndent": 60, **_box(HAIR, 9)}),
-    "unstated": (
-        "result",
-        {"HoriJustify": CENTER, "ParaIndent": 0, "CharWeight": BOLD, **_box(INK, 53)},
+    "reason": (
+        "text",
+        {"CharHeight": 8.5, "IsTextWrapped": True, "HoriJustify": LEFT, **_box(HAIR, 9)},
     ),
+    "unstated": ("result", {"HoriJustify": CENTER, "CharWeight": BOLD, **_box(INK, 53)}),
     "zero": ("result", {"CharColor": HAIR}),
     "impossible": (
         "result",
-        {"HoriJustify": CENTER, "ParaIndent": 0, "CellBackColor": PLUM, "CharColor": WHITE, "CharWeight": BOLD},
+        {"HoriJustify": CENTER, "CellBackColor": PLUM, "CharColor": WHITE, "CharWeight": BOLD},
     ),
     "not shown impossible": (
         "result",
-        {"HoriJustify": CENTER, "ParaIndent": 0, "CellBackColor": AMBER, "CharPosture": ITALIC},
+        {"HoriJustify": CENTER, "CellBackColor": AMBER, "CharPosture": ITALIC},
     ),
-    "consistent": ("result", {"HoriJustify": CENTER, "ParaIndent": 0, "CellBackColor": ICE}),
+    "consistent": ("result", {"HoriJustify": CENTER, "CellBackColor": ICE}),
 }
 
 VERDICTS = ("impossible", "not shown impossible", "consistent")

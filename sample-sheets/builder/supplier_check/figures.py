@@ -104,7 +104,7 @@ LEFT_OUT = (
     "make-up, no blow-down; the steam to the deaerator leaves at the crossover; drains add nothing to "
     "the condenser.\n\n"
     "Steam that leaks from HP to IP inside one casing is not seen: it cools the IP exhaust and can lift "
-    "the apparent IP efficiency by several points. Ask about it before drawing a conclusion.\n\n"
+    "the apparent IP efficiency by points (common practice, no source). Ask about it before drawing a conclusion.\n\n"
     "Boiler efficiency here is heat to the steam over fuel heat; a claim by the loss method also counts "
     "credits, such as the heat of the combustion air.\n\n"
     "Isentropic efficiency holds a wet stage against a wet ideal: moisture, leaving loss and packing "
