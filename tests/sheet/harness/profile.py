@@ -53,7 +53,7 @@ def _give(folder, owner):
 
 
 def run_unopkg(profile, *arguments):
-    """Runs unopkg on a profile and returns what it printed."""
+    """Runs unopkg on a profile and returns what it printed. File names must be absolute."""
     prefix, owner = _as_somebody_else()
     environment = dict(os.environ)
     copies = []
@@ -78,6 +78,7 @@ def run_unopkg(profile, *arguments):
             check=False,
             stdin=subprocess.DEVNULL,
             env=environment,
+            cwd=profile,  # nobody may not be let into the folder where root stands
         )
     finally:
         if owner is not None:
