@@ -12,12 +12,19 @@ HERE = os.path.dirname(os.path.abspath(__file__))
 SAMPLES = os.path.dirname(HERE)
 sys.path[:0] = [HERE, os.path.join(os.path.dirname(SAMPLES), "tests", "sheet")]
 
-from harness.office import Office  # noqa: E402
+from harness.office import Document, Office  # noqa: E402
 from harness.profile import Profile  # noqa: E402
 
 import supplier_check  # noqa: E402
 
 WORKBOOKS = (supplier_check,)
+
+
+def shown(office):
+    """A new spreadsheet that is not hidden: of a hidden one, frozen panes would not be stored."""
+    return Document(
+        office, office.desktop.loadComponentFromURL("private:factory/scalc", "_blank", 0, ())
+    )
 
 
 def main():
@@ -33,7 +40,7 @@ def main():
         with Office(profile.folder) as office:
             for workbook in WORKBOOKS:
                 path = os.path.join(given.out, workbook.FILE)
-                with office.new() as document:
+                with shown(office) as document:
                     workbook.build(document)
                     document.save(path)
                 print(path)

@@ -22,8 +22,10 @@ AGREES = "agrees"
 FAILED = "not recomputed"
 BLANK = "no claim"
 
+# The cycle gives at most Carnot's share of the heat, pump power taken off; gross power is before
+# that is taken off. Fuel gives at most its higher heating value.
 _BOILER_LIMIT = 'IF(claim_boiler_basis="HHV";1;higher_heating_value/lower_heating_value)'
-_UNIT_LIMIT = "carnot_limit*IF({}=\"HHV\";1;higher_heating_value/lower_heating_value)"
+_UNIT_LIMIT = "gross_limit*IF({}=\"HHV\";1;higher_heating_value/lower_heating_value)"
 
 
 def _by_basis(key, kind):
@@ -63,7 +65,7 @@ RULES = {
         "power",
         "unit_power",
         "gross_from_states",
-        "carnot_limit*heat_added",
+        "gross_limit*heat_added",
         "Carnot at the mean temperature of heating",
     ),
     "net": ("higher", "power", "unit_power", "net_output", "gross_power", "net is below gross"),
@@ -72,7 +74,7 @@ RULES = {
         "heat_rate",
         "unit_heat_rate",
         'IF(claim_cycle_boundary="net";rate_turbine_net;rate_turbine_gross)',
-        "HEAT_RATE(carnot_limit;unit_set)",
+        "HEAT_RATE(gross_limit;unit_set)",
         "Carnot at the mean temperature of heating",
     ),
     "boiler": (

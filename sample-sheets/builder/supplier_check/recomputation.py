@@ -683,6 +683,14 @@ class Recomputation:
                 "carnot_limit",
             ),
             (
+                "Gross power of heat, at most",
+                "=carnot_limit+MAX(0;pump_fluid)/heat_added",
+                "percent",
+                "Carnot, and the feed pump's power that comes from outside",
+                "%",
+                "gross_limit",
+            ),
+            (
                 "Carnot, at the peak temperature",
                 "=CARNOT(main_steam_temperature;condensing;unit_set)",
                 "percent",
