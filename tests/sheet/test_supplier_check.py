@@ -146,6 +146,12 @@ class TestAsCommitted(SupplierCheckCase):
             content = archive.read("content.xml").decode("utf-8")
         self.assertNotIn("xlink:href=\"file:", content)
 
+    def test_headings_stay_in_sight(self):
+        with zipfile.ZipFile(WORKBOOK) as archive:
+            settings = archive.read("settings.xml").decode("utf-8")
+        frozen = settings.count('config:name="VerticalSplitMode" config:type="short">2<')
+        self.assertEqual(frozen, 4)
+
     def test_reasons_say_what_was_found(self):
         self.assertIn("isentropic", self.workbook.reason("ip"))
         self.assertIn("gross on LHV", self.workbook.reason("unit"))
