@@ -1,7 +1,7 @@
 """The engine's catalogue, read from the library inside the extension under test.
 
-Only the part of engine/abi/busbar.h that the sheet tests need: names, arguments, examples, and calls
-whose results the cells are compared with.
+Only the part of engine/abi/busbar.h that the sheet tests need: names, arguments, examples, and
+calls whose results the cells are compared with.
 """
 
 import ctypes
@@ -138,12 +138,8 @@ class Engine:
     def _function(self, handle):
         words = [self._function_text(handle, field).decode() for field in range(10)]
         given = dict(part.strip().split("=", 1) for part in words[GIVEN].split("|") if part.strip())
-        arguments = tuple(
-            self._argument(handle, i) for i in range(self._argument_count(handle))
-        )
-        return Function(
-            words[NAME], words[EXAMPLE], given, words[ANSWER], words[SOURCE], arguments
-        )
+        arguments = tuple(self._argument(handle, i) for i in range(self._argument_count(handle)))
+        return Function(words[NAME], words[EXAMPLE], given, words[ANSWER], words[SOURCE], arguments)
 
     def _argument(self, handle, index):
         ranges = {}
@@ -159,8 +155,8 @@ class Engine:
         )
 
     def call(self, name, *arguments):
-        """A number, a text, or the error as Calc shows it; rows of these for a table. An argument is
-        a number, a text, None (left out) or rows of numbers and texts (None is a blank cell)."""
+        """A number, a text, or the error as Calc shows it; rows of these for a table. An argument
+        is a number, a text, None (left out) or rows of numbers and texts (None: a blank cell)."""
         values = [None if a is None else self._value(a) for a in arguments]
         handles = (ctypes.c_void_p * max(1, len(values)))(*values)
         result = ctypes.c_void_p()

@@ -29,7 +29,9 @@ class Examples(SheetCase):
                     )
                 else:
                     shown = document.text("D9")
-                    self.assertTrue(shown.startswith(function.answer), f"{function.example}: {shown}")
+                    self.assertTrue(
+                        shown.startswith(function.answer), f"{function.example}: {shown}"
+                    )
 
     def test_every_example_holds_its_function(self):
         # An example that does not call its function would prove nothing of it.

@@ -1,9 +1,8 @@
 """Whatever a cell may hold, in every argument of every function: a Calc error, a WHY sentence that
 names function, argument and limit, and an office that lives on.
 
-The errors expected are those of the function reference: #N/A for a missing value, #VALUE! for a wrong
-kind, Err:502 for a zero or blank that cannot be and for what is out of range, Err:523 for an
-iteration at its cap. The limits are the ones that the catalogue states for each argument.
+The errors expected: #N/A for a missing value, #VALUE! for a wrong kind, Err:502 for a zero or blank
+that cannot be and for what is out of range, Err:523 for an iteration at its cap. The limits are the ones that the catalogue states for each argument.
 """
 
 import collections
@@ -193,7 +192,9 @@ class Inputs(SheetCase):
                         continue
                     words = [argument.name, self.limit_words(argument, number, unit_set)]
                     formula = self.call(function, index, others, repr(number), unit_set)
-                    cases.append(Case(f"{argument.name} in {unit_set}", formula, {"Err:502"}, words))
+                    cases.append(
+                        Case(f"{argument.name} in {unit_set}", formula, {"Err:502"}, words)
+                    )
         self.assertGreater(len(cases), 60)
         self.check(cases)
 
@@ -216,7 +217,12 @@ class Inputs(SheetCase):
             if function.arguments[index].kind != catalogue.OPTIONS:
                 continue
             gaps = [""] * (index - len(good))
-            same = [good, [*good, *gaps, ""], [*good, *gaps, '"metric"'], [*good, *gaps, '" METRIC "']]
+            same = [
+                good,
+                [*good, *gaps, ""],
+                [*good, *gaps, '"metric"'],
+                [*good, *gaps, '" METRIC "'],
+            ]
             formulas = [f"={function.name}({';'.join(arguments)})" for arguments in same]
             with self.subTest(function=function.name):
                 for row, formula in enumerate(formulas, 1):
@@ -281,7 +287,9 @@ class Kinds(SheetCase):
             "=NOSUCHNAME": "#NAME?",
         }.items():
             with self.subTest(formula):
-                self.document.set_all({"A1": formula, "B1": "=STEAM(A1;540)", "B2": "=ENTHALPY_OF(B1)"})
+                self.document.set_all(
+                    {"A1": formula, "B1": "=STEAM(A1;540)", "B2": "=ENTHALPY_OF(B1)"}
+                )
                 self.assert_error("B1", shown)
                 self.assert_error("B2", shown)
                 self.assertTrue(self.why("B2").startswith("B2 passes on the error of A1: "))
@@ -310,7 +318,9 @@ class Ranges(SheetCase):
         self.assertEqual(self.document.value("B2"), self.document.value("C2"))
 
     def test_a_single_cell_is_a_range_of_one(self):
-        self.document.set_all({"A1": 0.9, "B1": "=EFFICIENCY_CHAIN(A1)", "B2": "=EFFICIENCY_CHAIN(A1:A1)"})
+        self.document.set_all(
+            {"A1": 0.9, "B1": "=EFFICIENCY_CHAIN(A1)", "B2": "=EFFICIENCY_CHAIN(A1:A1)"}
+        )
         self.assertEqual(self.document.value("B1"), 0.9)
         self.assertEqual(self.document.value("B2"), 0.9)
         self.document.set_all({"A2": "=STEAM(10;300;5)", "B3": "=FLOW_OF(MIX_OUT(A2))"})
@@ -321,7 +331,9 @@ class Ranges(SheetCase):
         self.document.set("B1", "=EFFICIENCY_CHAIN(A1:A3)")
         self.assert_error("B1", "#N/A")
         self.assertIn("links in row 2, column 1 of its range is blank", self.why("B1"))
-        self.document.set_all({"C1": "=STEAM(10;300;5)", "C3": "=STEAM(10;200;3)", "D1": "=MIX_OUT(C1:C3)"})
+        self.document.set_all(
+            {"C1": "=STEAM(10;300;5)", "C3": "=STEAM(10;200;3)", "D1": "=MIX_OUT(C1:C3)"}
+        )
         self.assert_error("D1", "#N/A")
         self.assertIn("streams in row 2, column 1 of its range is blank", self.why("D1"))
 
@@ -382,21 +394,37 @@ class Mistakes(SheetCase):
                 self.assertIn(word, answer)
 
     def test_percentages_for_fractions(self):
-        self.assert_told("=TURBINE_OUT(STEAM(100;540);0.05;88)", "Err:502", "isentropic efficiency 88", "a fraction is meant, 0.88")
+        self.assert_told(
+            "=TURBINE_OUT(STEAM(100;540);0.05;88)",
+            "Err:502",
+            "isentropic efficiency 88",
+            "a fraction is meant, 0.88",
+        )
         self.assert_told("=HEAT_RATE(38)", "Err:502", "efficiency 38 is above 1", "0.38")
         self.assert_told("=STEAM_AT_DRYNESS(0.05;88)", "Err:502", "dryness 88", "0.88")
         self.assert_told('=EFFICIENCY_ON_BASIS(55;"LHV";"HHV";55.5;50)', "Err:502", "0.55")
 
     def test_gauge_for_absolute_pressure(self):
-        self.assert_told("=STEAM(-0.95;33)", "Err:502", "pressure -0.95 bar is not above zero", "ABSOLUTE_PRESSURE")
+        self.assert_told(
+            "=STEAM(-0.95;33)",
+            "Err:502",
+            "pressure -0.95 bar is not above zero",
+            "ABSOLUTE_PRESSURE",
+        )
         self.assert_told("=ABSOLUTE_PRESSURE(99)", "#N/A", "ambient is left out")
-        self.assert_told("=ABSOLUTE_PRESSURE(99;1013)", "Err:502", "ambient 1013 bar is above 1.1 bar")
+        self.assert_told(
+            "=ABSOLUTE_PRESSURE(99;1013)", "Err:502", "ambient 1013 bar is above 1.1 bar"
+        )
         self.assert_told('=CONVERT_UNIT(100;"barg";"bar")', "#VALUE!", "ABSOLUTE_PRESSURE")
 
     def test_kelvin_fahrenheit_and_pascal_under_metric(self):
-        self.assert_told("=STEAM(10000000;813.15)", "Err:502", "pressure 10000000 bar is above 1000 bar")
+        self.assert_told(
+            "=STEAM(10000000;813.15)", "Err:502", "pressure 10000000 bar is above 1000 bar"
+        )
         self.assert_told("=STEAM(100;-459)", "Err:502", "temperature -459 °C is below 0 °C")
-        self.assert_told("=SATURATION_PRESSURE(453.15)", "Err:502", "temperature 453.15 °C is above 373.946 °C")
+        self.assert_told(
+            "=SATURATION_PRESSURE(453.15)", "Err:502", "temperature 453.15 °C is above 373.946 °C"
+        )
         self.assert_told('=STEAM(100;27;;"si")', "Err:502", "temperature 27 K is below 273.15 K")
 
     def test_unit_set_in_the_wrong_place(self):
@@ -406,10 +434,18 @@ class Mistakes(SheetCase):
         self.assert_told('=STEAM(100;540;;"bar")', "#VALUE!", 'options "bar"')
 
     def test_streams_and_numbers_mixed_up(self):
-        self.assert_told("=STEAM_ENTHALPY(STEAM(100;540);540)", "#VALUE!", "pressure", "a number is needed")
-        self.assert_told("=ENTHALPY_OF(100)", "#VALUE!", "stream is a number where a stream is needed")
-        self.assert_told("=TURBINE_OUT(100;0.05;0.88)", "#VALUE!", "inlet is a number where a stream")
-        self.assert_told("=TURBINE_OUT(STEAM(100;540);STEAM(0.05;33);0.88)", "#VALUE!", "outlet pressure")
+        self.assert_told(
+            "=STEAM_ENTHALPY(STEAM(100;540);540)", "#VALUE!", "pressure", "a number is needed"
+        )
+        self.assert_told(
+            "=ENTHALPY_OF(100)", "#VALUE!", "stream is a number where a stream is needed"
+        )
+        self.assert_told(
+            "=TURBINE_OUT(100;0.05;0.88)", "#VALUE!", "inlet is a number where a stream"
+        )
+        self.assert_told(
+            "=TURBINE_OUT(STEAM(100;540);STEAM(0.05;33);0.88)", "#VALUE!", "outlet pressure"
+        )
         self.assert_told('=ENTHALPY_OF("steam at 100 bar")', "#VALUE!", "not the text of a stream")
 
     def test_separators(self):
@@ -419,21 +455,44 @@ class Mistakes(SheetCase):
         self.assert_told('=STEAM("100,5";540)', "#VALUE!", 'pressure "100,5"')
 
     def test_bases_and_boundaries(self):
-        self.assert_told('=EFFICIENCY_ON_BASIS(0.38;"net";"gross";30;28)', "#VALUE!", 'from basis "net"', "boundary")
-        self.assert_told('=EFFICIENCY_ON_BASIS(0.38;"HHV";"LHV";28;30)', "Err:502", "lower heating value 30", "28")
+        self.assert_told(
+            '=EFFICIENCY_ON_BASIS(0.38;"net";"gross";30;28)',
+            "#VALUE!",
+            'from basis "net"',
+            "boundary",
+        )
+        self.assert_told(
+            '=EFFICIENCY_ON_BASIS(0.38;"HHV";"LHV";28;30)',
+            "Err:502",
+            "lower heating value 30",
+            "28",
+        )
         self.assert_told("=EFFICIENCY_ON_BASIS(0.38)", "#N/A", "from basis is left out")
         self.assert_told("=NET_POWER(100;0)", "Err:502", "auxiliary power is zero or blank")
 
     def test_ends_swapped(self):
-        self.assert_told("=CARNOT(30;540)", "Err:502", "cold temperature 540 °C is not below the hot temperature 30 °C")
-        self.assert_told("=TURBINE_OUT(STEAM(10;300);100;0.88)", "Err:502", "outlet pressure 100 bar", "10 bar")
+        self.assert_told(
+            "=CARNOT(30;540)",
+            "Err:502",
+            "cold temperature 540 °C is not below the hot temperature 30 °C",
+        )
+        self.assert_told(
+            "=TURBINE_OUT(STEAM(10;300);100;0.88)", "Err:502", "outlet pressure 100 bar", "10 bar"
+        )
         self.assert_told("=PUMP_OUT(STEAM(100;540);120;0.8)", "Err:502", "inlet", "steam")
         self.assert_told("=STEAM(540;100000)", "Err:502", "temperature 100000 °C")
 
     def test_flows_forgotten(self):
-        self.assert_told("=FLUID_POWER(STEAM(100;540);STEAM(10;300))", "#N/A", "inlet carries no flow", "SET_FLOW")
+        self.assert_told(
+            "=FLUID_POWER(STEAM(100;540);STEAM(10;300))",
+            "#N/A",
+            "inlet carries no flow",
+            "SET_FLOW",
+        )
         self.assert_told("=STEAM(100;540;0)", "Err:502", "flow is zero or blank")
-        self.assert_told("=FLUID_POWER(STEAM(100;540;5);STEAM(10;300;6))", "Err:502", "6 kg/s", "5 kg/s")
+        self.assert_told(
+            "=FLUID_POWER(STEAM(100;540;5);STEAM(10;300;6))", "Err:502", "6 kg/s", "5 kg/s"
+        )
 
     def test_units_misspelt(self):
         self.assert_told('=CONVERT_UNIT(100;"bar";"kW")', "#VALUE!", 'to "kW"')
@@ -448,7 +507,14 @@ class Mistakes(SheetCase):
         self.assert_told("=STEEM(100;540)", "#NAME?", "does not know")
 
     def test_why_of_no_cell(self):
-        for formula in ("=WHY()", "=WHY(5)", "=WHY(STEAM(1;2))", '=WHY("A1")', "=WHY(A1:B2)", "=WHY(A1;A2)"):
+        for formula in (
+            "=WHY()",
+            "=WHY(5)",
+            "=WHY(STEAM(1;2))",
+            '=WHY("A1")',
+            "=WHY(A1:B2)",
+            "=WHY(A1;A2)",
+        ):
             with self.subTest(formula):
                 self.document.set("B2", formula)
                 self.assertTrue(self.document.error("B2") or "range" in self.document.text("B2"))
