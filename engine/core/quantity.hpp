@@ -23,6 +23,15 @@ enum class Quantity : std::uint8_t {
   flow,                    ///< mass flow, kg/s
   power,                   ///< W
   heat_rate,               ///< fuel energy per unit of electricity, J/J
+  specific_energy,         ///< internal, Helmholtz and Gibbs energy, exergy; J/kg
+  heat_capacity,           ///< specific, J/(kg K)
+  velocity,                ///< m/s
+  thermal_expansion,       ///< relative volume per temperature, 1/K
+  compressibility,         ///< relative volume per pressure, 1/Pa
+  joule_thomson,           ///< temperature per pressure at constant enthalpy, K/Pa
+  viscosity,               ///< dynamic, Pa s
+  thermal_conductivity,    ///< W/(m K)
+  surface_tension,         ///< N/m
   same_unit,               ///< any unit; the result of the function is in the same one
   count_
 };
@@ -48,6 +57,15 @@ using Density = Of<Quantity::density>;
 using Flow = Of<Quantity::flow>;
 using Power = Of<Quantity::power>;
 using HeatRate = Of<Quantity::heat_rate>;
+using SpecificEnergy = Of<Quantity::specific_energy>;
+using HeatCapacity = Of<Quantity::heat_capacity>;
+using Velocity = Of<Quantity::velocity>;
+using ThermalExpansion = Of<Quantity::thermal_expansion>;
+using Compressibility = Of<Quantity::compressibility>;
+using JouleThomson = Of<Quantity::joule_thomson>;
+using Viscosity = Of<Quantity::viscosity>;
+using ThermalConductivity = Of<Quantity::thermal_conductivity>;
+using SurfaceTension = Of<Quantity::surface_tension>;
 using SameUnit = Of<Quantity::same_unit>;
 
 }  // namespace busbar

@@ -15,8 +15,10 @@ constexpr std::size_t kQuantities = static_cast<std::size_t>(Quantity::count_);
 // 9.806 65 m/s2, 1 Btu (International Table) = 1055.055 852 62 J, so that 1 Btu/lb = 2326 J/kg and
 // 1 Btu/(lb °F) = 4186.8 J/(kg K) exactly (NIST SP 811, appendix B, footnotes 9 and 22).
 constexpr double kPound = 0.45359237;
-constexpr double kCubicFoot = 0.3048 * 0.3048 * 0.3048;
-constexpr double kPsi = kPound * 9.80665 / (0.0254 * 0.0254);
+constexpr double kFoot = 0.3048;
+constexpr double kCubicFoot = kFoot * kFoot * kFoot;
+constexpr double kFall = 9.80665;
+constexpr double kPsi = kPound * kFall / (0.0254 * 0.0254);
 constexpr double kBtu = 1055.05585262;
 constexpr double kFahrenheitZero = 459.67 * 5 / 9;
 
@@ -44,6 +46,22 @@ constexpr std::array<QuantityUnits, kQuantities> kTable{{
     {"mass flow", {{{"kg/s", 1, 1, 0}, {"lb/h", kPound, 3600, 0}, {"kg/s", 1, 1, 0}}}},
     {"power", {{{"MW", 1e6, 1, 0}, {"MW", 1e6, 1, 0}, {"W", 1, 1, 0}}}},
     {"heat rate", {{{"kJ/kWh", 1, 3600, 0}, {"Btu/kWh", kBtu, 3.6e6, 0}, {"J/J", 1, 1, 0}}}},
+    {"specific energy", {{{"kJ/kg", 1e3, 1, 0}, {"Btu/lb", 2326, 1, 0}, {"J/kg", 1, 1, 0}}}},
+    {"specific heat capacity",
+     {{{"kJ/(kg K)", 1e3, 1, 0}, {"Btu/(lb °F)", 4186.8, 1, 0}, {"J/(kg K)", 1, 1, 0}}}},
+    {"velocity", {{{"m/s", 1, 1, 0}, {"ft/s", kFoot, 1, 0}, {"m/s", 1, 1, 0}}}},
+    {"thermal expansion", {{{"1/K", 1, 1, 0}, {"1/°F", 9, 5, 0}, {"1/K", 1, 1, 0}}}},
+    {"compressibility", {{{"1/bar", 1, 1e5, 0}, {"1/psia", 1, kPsi, 0}, {"1/Pa", 1, 1, 0}}}},
+    {"Joule-Thomson coefficient",
+     {{{"K/bar", 1, 1e5, 0}, {"°F/psia", 5, 9 * kPsi, 0}, {"K/Pa", 1, 1, 0}}}},
+    {"dynamic viscosity",
+     {{{"µPa s", 1, 1e6, 0}, {"lb/(ft h)", kPound, kFoot * 3600, 0}, {"Pa s", 1, 1, 0}}}},
+    {"thermal conductivity",
+     {{{"W/(m K)", 1, 1, 0},
+       {"Btu/(h ft °F)", kBtu * 9, 3600 * kFoot * 5, 0},
+       {"W/(m K)", 1, 1, 0}}}},
+    {"surface tension",
+     {{{"mN/m", 1, 1e3, 0}, {"lbf/ft", kPound* kFall / kFoot, 1, 0}, {"N/m", 1, 1, 0}}}},
     {"amount", {kOne, kOne, kOne}},
 }};
 
