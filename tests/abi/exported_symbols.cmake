@@ -6,7 +6,7 @@ function(complain message)
   set(failed TRUE PARENT_SCOPE)
 endfunction()
 
-execute_process(COMMAND ${NM} -D --defined-only --with-symbol-versions ${LIBRARY}
+execute_process(COMMAND ${NM} -D --defined-only ${LIBRARY}
                 OUTPUT_VARIABLE listing COMMAND_ERROR_IS_FATAL ANY)
 string(REGEX MATCHALL "[^\n]+" lines "${listing}")
 set(exported)

@@ -15,7 +15,7 @@ set(prefix ${WORK}/prefix)
 run(${CMAKE_COMMAND} --install ${BUILD}/engine --prefix ${prefix} --config "${CONFIG}")
 
 run(${CMAKE_COMMAND} -G ${GENERATOR} -S ${CONSUMER} -B ${WORK}/with-cmake
-    -DCMAKE_PREFIX_PATH=${prefix} -DCMAKE_C_COMPILER=${C_COMPILER} -DCMAKE_C_FLAGS=${FLAGS})
+    -DCMAKE_PREFIX_PATH=${prefix} -DCMAKE_C_COMPILER=${C_COMPILER} "-DCMAKE_C_FLAGS=${FLAGS}")
 run(${CMAKE_COMMAND} --build ${WORK}/with-cmake)
 run(${WORK}/with-cmake/consumer)
 

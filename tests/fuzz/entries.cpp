@@ -92,9 +92,33 @@ constexpr const char* kWords[] = {"metric", "us",       "si",     "LHV", "HHV", 
                                   "barg",   "kJ/kg",    "°C",     "",    "STEAM", "LBA10",
                                   "WHY",    "WHY_CALL", "CARNOT", "a:b", "K",     "kJ/(kg K)"};
 
+double some_number(Source& source) {
+  const std::uint8_t choice = source.byte();
+  if (choice < 60) return std::bit_cast<double>(source.word());
+  if (choice < 200) return kTelling[source.byte() % std::size(kTelling)];
+  return 1e5 * std::exp(source.byte() / 16.0 - 8);
+}
+
+// Numbers that no device would give, under right check digits.
+support::Value forged_stream(Source& source) {
+  Stream stream;
+  stream.phase = static_cast<Phase>(source.byte() % static_cast<int>(Phase::count_));
+  stream.pressure = some_number(source);
+  stream.temperature = some_number(source);
+  stream.enthalpy = some_number(source);
+  if (stream.phase == Phase::two_phase) stream.dryness = source.byte() / 255.0;
+  if ((source.byte() & 1U) != 0) stream.flow = some_number(source);
+  std::string text;
+  write_stream(text, stream, static_cast<UnitSet>(source.byte() % 3));
+  return support::Value::text(text);
+}
+
 support::Value one_cell(Source& source) {
   using support::Value;
-  switch (source.byte() % 10) {
+  switch (source.byte() % 12) {
+    case 10:
+    case 11:
+      return forged_stream(source);
     case 0:
       return Value::blank();
     case 1:
@@ -135,6 +159,14 @@ support::Value argument(Source& source) {
   return grid;
 }
 
+// A quoted word of the caller may hold what it likes.
+std::string unquoted(std::string text) {
+  const auto first = text.find('"');
+  const auto last = text.rfind('"');
+  if (first != last) text.erase(first, last - first);
+  return text;
+}
+
 void check_answer(const support::Value& answer) {
   for (std::size_t r = 0; r < answer.rows(); ++r) {
     for (std::size_t c = 0; c < answer.columns(); ++c) {
@@ -144,7 +176,7 @@ void check_answer(const support::Value& answer) {
       if (answer.kind(r, c) == BUSBAR_ERROR) {
         const std::string reason = answer.reason(r, c);
         require(!reason.empty() && is_printable_utf8(reason), "a reason can be printed");
-        require(reason.find_first_of("{}") == std::string::npos, "a reason is filled in");
+        require(unquoted(reason).find_first_of("{}") == std::string::npos, "a reason is filled in");
       }
       if (answer.kind(r, c) == BUSBAR_TEXT) {
         require(is_printable_utf8(answer.text_at(r, c)), "a text can be printed");
@@ -162,9 +194,15 @@ void stream_text(Bytes bytes) {
     require(*read.failure().reason != '\0', "a refusal has a reason");
     return;
   }
+  // A fuzzer that watches comparisons forges check digits, so the face may say anything; yet what
+  // is taken is a stream, and its own text is that stream again.
   std::string anew;
   write_stream(anew, *read, read->face);
-  require(anew == text, "a stream text is the only text of its stream");
+  const Outcome<Stream> again = read_stream(anew);
+  require(static_cast<bool>(again), "the text of a stream can be read");
+  std::string third;
+  write_stream(third, *again, again->face);
+  require(third == anew, "a stream and its text are one");
 }
 
 void unit_expression(Bytes bytes) {

@@ -12,7 +12,7 @@ namespace busbar::fuzz {
 
 using Bytes = std::span<const std::uint8_t>;
 
-/// A stream text: what is taken writes itself anew to the last byte.
+/// A stream text: what is taken is a stream, and its own text is that stream again.
 void stream_text(Bytes bytes);
 
 /// A unit: what is taken has a finite factor above zero and converts into itself.
