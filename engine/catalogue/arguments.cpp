@@ -9,6 +9,8 @@
 namespace busbar {
 namespace {
 
+// What is above 1 may be a percentage; 1.05 is rather a fraction that came out too high.
+constexpr double kLeastPercentage = 2;
 constexpr double kHundredPercent = 100;
 
 std::uint8_t position(std::size_t index) { return static_cast<std::uint8_t>(index + 1); }
@@ -71,7 +73,7 @@ Failure outside(std::size_t index, const Argument& argument, Quantity quantity, 
   const Measure limit{argument.high, quantity};
   // 1e308 bar is more pascal than a double holds.
   if (std::isinf(si)) return against_limit(Fault::outside_range, at, "is above {1}", value, limit);
-  if (quantity == Quantity::fraction && si <= kHundredPercent) {
+  if (quantity == Quantity::fraction && si >= kLeastPercentage && si <= kHundredPercent) {
     const Measure meant{si / kHundredPercent, quantity};
     return {Fault::outside_range,
             at,

@@ -65,6 +65,14 @@ void explain_stage(const Slot* in, const Result& result, UnitSet units, std::str
 }
 
 void explain_pump(const Slot* in, const Result& result, UnitSet units, std::string& text) {
+  if (result.si > 1) {
+    text +=
+        " Above 1: as read, the pump would take less than the isentropic power, which the second "
+        "law "
+        "rules out for an adiabatic machine; weigh the uncertainty of the temperature rise.";
+  } else if (result.si < 0) {
+    text += " Below 0: as read, the fluid lost enthalpy instead of taking it.";
+  }
   const auto slope = machine::pump_efficiency_per_kelvin(*in[0].stream, *in[1].stream);
   if (slope) {
     // One tenth of a kelvin is a good matched pair of resistance thermometers.

@@ -6,6 +6,9 @@
 namespace busbar::functions {
 namespace {
 
+// An efficiency on the lower heating value may pass 1 where the exhaust is condensed.
+constexpr double kMostEfficiency = 1.2;
+
 Outcome<HeatRate> heat_rate(Fraction efficiency) { return HeatRate{1 / efficiency.si}; }
 
 Outcome<Fraction> efficiency_from_heat_rate(HeatRate rate) {
@@ -47,7 +50,14 @@ Outcome<Fraction> efficiency_on_basis(Fraction efficiency, Word from, Word to, S
                                       SameUnit lower) {
   const Outcome<double> ratio = fuel_energy_ratio(from, to, higher, lower);
   if (!ratio) return ratio.failure();
-  return Fraction{efficiency.si / *ratio};
+  const double changed = efficiency.si / *ratio;
+  if (changed > kMostEfficiency) {
+    return Failure{Fault::impossible,
+                   5,
+                   "does not go with the higher one: the efficiency would become {0}, above {1}",
+                   {{{changed, Quantity::fraction}, {kMostEfficiency, Quantity::fraction}}}};
+  }
+  return Fraction{changed};
 }
 
 Outcome<SameUnit> heat_rate_on_basis(SameUnit rate, Word from, Word to, SameUnit higher,
@@ -64,9 +74,6 @@ void explain_basis(const Slot*, const Result&, UnitSet, std::string& text) {
 }
 
 constexpr const char* kChapter = "Performance";
-
-// An efficiency on the lower heating value may pass 1 where the exhaust is condensed.
-constexpr double kMostEfficiency = 1.2;
 
 constexpr Argument kEfficiency[] = {
     {"efficiency", "Electricity over fuel energy, on any one stated basis", kAboveZero, 1}};

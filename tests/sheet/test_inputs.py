@@ -506,6 +506,28 @@ class Mistakes(SheetCase):
     def test_names_misspelt(self):
         self.assert_told("=STEEM(100;540)", "#NAME?", "does not know")
 
+    def test_a_fraction_that_came_out_too_high_is_no_percentage(self):
+        self.document.set("B2", "=HEAT_RATE(1.05)")
+        self.assertIn("efficiency 1.05 is above 1", self.why("B2"))
+        self.assertNotIn("percentage", self.why("B2"))
+
+    def test_a_slip_of_ten_in_a_heating_value(self):
+        self.assert_told(
+            '=EFFICIENCY_ON_BASIS(0.42;"HHV";"LHV";55;5)',
+            "Err:502",
+            "lower heating value does not go with the higher one",
+            "4.62",
+        )
+
+    def test_impossible_measurements_are_computed_and_said(self):
+        # The second law: Moran and Shapiro, 5th ed., section 6.8, isentropic efficiencies.
+        self.document.set("B2", "=PUMP_EFFICIENCY(STEAM(1;30);STEAM(120;29))")
+        self.assertGreater(self.document.value("B2"), 1)
+        self.assertIn("the second law rules out", self.why("B2"))
+        self.document.set("B3", "=TURBINE_EFFICIENCY(STEAM(100;540);STEAM_AT_DRYNESS(0.05;0.78))")
+        self.assertGreater(self.document.value("B3"), 1)
+        self.assertIn("the second law rules out", self.why("B3"))
+
     def test_why_of_no_cell(self):
         for formula in (
             "=WHY()",
