@@ -21,7 +21,6 @@ using com::sun::star::uno::Any;
 using com::sun::star::uno::Reference;
 using com::sun::star::uno::Sequence;
 using com::sun::star::uno::UNO_QUERY_THROW;
-using com::sun::star::uno::XComponentContext;
 
 // The answer depends on the place of the cell, on chance, on the clock, on other documents or on
 // the network: to compute it again would give another answer or have an effect.
@@ -57,32 +56,6 @@ bool contains(std::string_view list, std::string_view word) {
        at = list.find(word, at + 1))
     if (list[at - 1] == ' ' && list[at + word.size()] == ' ') return true;
   return false;
-}
-
-Result unknown(std::string why) {
-  Result result;
-  result.unknown = std::move(why);
-  return result;
-}
-
-Result of_value(Any value) {
-  Result result;
-  result.value = std::move(value);
-  return result;
-}
-
-Result of_fault(Fault fault) {
-  Result result;
-  result.value = to_calc(fault.error);
-  result.fault = std::move(fault);
-  return result;
-}
-
-Result calc_fault(CalcError error, std::string text) {
-  Fault fault;
-  fault.error = error;
-  fault.text = std::move(text);
-  return of_fault(std::move(fault));
 }
 
 const Node& missing() {
@@ -161,11 +134,11 @@ Result Evaluator::condition_list(const Node& node, Want want) {
 }
 
 Result Evaluator::switch_list(const Node& node, Want want) {
-  const Result subject = operand(child(node, 0), want);
+  Result subject = operand(child(node, 0), want);
   if (!subject.usable()) return subject;
   std::size_t i = 1;
   for (; i + 1 < node.children.size(); i += 2) {
-    const Result candidate = operand(node.children[i], want);
+    Result candidate = operand(node.children[i], want);
     if (!candidate.usable()) return candidate;
     const Any same = apply(Operator::equal, subject.value, candidate.value);
     if (as_number(element_of(same, 0, 0)) != 0) return branch(node.children[i + 1], want);
@@ -265,11 +238,7 @@ Result Evaluator::through_calc(const Node& node, Want want) {
     const auto area = area_behind(node.children[i]);
     if (area && !area->single() && !in_range && !single) {
       if (const auto failing = document_.first_error(*area)) {
-        in_range.emplace();
-        in_range->origin = Fault::Origin::cell;
-        in_range->error = document_.error(*failing);
-        in_range->cell = *failing;
-        in_range->in_range = true;
+        in_range = cell_fault(document_.error(*failing), *failing, true).fault;
         if (!tolerant) return of_fault(*in_range);
       }
     }

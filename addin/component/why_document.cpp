@@ -2,10 +2,7 @@
 
 #include <algorithm>
 #include <com/sun/star/beans/XPropertySet.hpp>
-#include <com/sun/star/container/XEnumeration.hpp>
-#include <com/sun/star/container/XEnumerationAccess.hpp>
 #include <com/sun/star/container/XIndexAccess.hpp>
-#include <com/sun/star/container/XNameAccess.hpp>
 #include <com/sun/star/container/XNamed.hpp>
 #include <com/sun/star/sheet/FormulaResult.hpp>
 #include <com/sun/star/sheet/XArrayFormulaTokens.hpp>
@@ -26,7 +23,6 @@ namespace busbar::addin {
 namespace {
 
 using com::sun::star::beans::XPropertySet;
-using com::sun::star::container::XEnumerationAccess;
 using com::sun::star::container::XIndexAccess;
 using com::sun::star::container::XNamed;
 using com::sun::star::sheet::NameToken;
@@ -46,7 +42,6 @@ using com::sun::star::table::XCellRange;
 using com::sun::star::uno::Any;
 using com::sun::star::uno::Reference;
 using com::sun::star::uno::Sequence;
-using com::sun::star::uno::UNO_QUERY;
 using com::sun::star::uno::UNO_QUERY_THROW;
 using rtl::OUString;
 
@@ -248,7 +243,7 @@ std::optional<Tokens> SheetDocument::name_tokens(const NameToken& name) const {
 }
 
 std::string SheetDocument::name_of(const Address& address, sal_Int32 seen_from) const {
-  const std::string local = column_name(address.column) + std::to_string(address.row + 1);
+  std::string local = column_name(address.column) + std::to_string(address.row + 1);
   if (address.sheet == seen_from) return local;
   const Reference<XNamed> named(sheet(address.sheet), UNO_QUERY_THROW);
   return quoted(to_utf8(named->getName())) + "." + local;

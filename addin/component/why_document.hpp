@@ -10,10 +10,10 @@
 #include <com/sun/star/table/XCellRange.hpp>
 #include <com/sun/star/uno/Reference.hxx>
 #include <com/sun/star/uno/Sequence.hxx>
-#include <compare>
 #include <cstddef>
 #include <optional>
 #include <string>
+#include <tuple>
 
 #include "calc_error.hpp"
 
@@ -23,7 +23,13 @@ struct Address {
   sal_Int32 sheet = 0;
   sal_Int32 row = 0;
   sal_Int32 column = 0;
-  auto operator<=>(const Address&) const = default;
+  // Sheet by sheet, row by row.
+  friend bool operator<(const Address& a, const Address& b) {
+    return std::tie(a.sheet, a.row, a.column) < std::tie(b.sheet, b.row, b.column);
+  }
+  friend bool operator==(const Address& a, const Address& b) {
+    return std::tie(a.sheet, a.row, a.column) == std::tie(b.sheet, b.row, b.column);
+  }
 };
 
 // A rectangle of cells on one sheet, ends included.

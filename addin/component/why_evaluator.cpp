@@ -17,41 +17,6 @@ constexpr int kMostNames = 16;  // names that stand for names
 constexpr std::size_t kMostExplanations = 3;
 constexpr std::size_t kMostBlanksNamed = 4;
 
-Result unknown(std::string why) {
-  Result result;
-  result.unknown = std::move(why);
-  return result;
-}
-
-Result of_value(Any value) {
-  Result result;
-  result.value = std::move(value);
-  return result;
-}
-
-Result of_fault(Fault fault) {
-  Result result;
-  result.value = to_calc(fault.error);
-  result.fault = std::move(fault);
-  return result;
-}
-
-Result calc_fault(CalcError error, std::string text) {
-  Fault fault;
-  fault.origin = Fault::Origin::calc;
-  fault.error = error;
-  fault.text = std::move(text);
-  return of_fault(std::move(fault));
-}
-
-Result engine_fault(CalcError error, std::string text) {
-  Fault fault;
-  fault.origin = Fault::Origin::engine;
-  fault.error = error;
-  fault.text = std::move(text);
-  return of_fault(std::move(fault));
-}
-
 // A sentence of the engine with its full stop, so that another may follow.
 std::string ended(std::string text) {
   if (!text.empty() && text.back() != '.') text += '.';
@@ -159,11 +124,7 @@ Result Evaluator::single_cell(const Address& address) {
   }
   const CalcError error = document_.error(address);
   if (error != CalcError::none) {
-    Fault fault;
-    fault.origin = Fault::Origin::cell;
-    fault.error = error;
-    fault.cell = address;
-    return of_fault(std::move(fault));
+    return cell_fault(error, address, false);
   }
   return of_value(document_.value(address));
 }
@@ -243,12 +204,7 @@ Result Evaluator::operand(const Node& node, Want want) {
     const auto area = area_behind(node);
     if (area && !area->single()) {
       if (const auto failing = document_.first_error(*area)) {
-        Fault fault;
-        fault.origin = Fault::Origin::cell;
-        fault.error = document_.error(*failing);
-        fault.cell = *failing;
-        fault.in_range = true;
-        if (!latent_) latent_ = fault;
+        if (!latent_) latent_ = cell_fault(document_.error(*failing), *failing, true).fault;
       }
     }
   }
@@ -261,7 +217,7 @@ Result Evaluator::compute_scaled(const Node& node, Want want, double factor) {
   Any value = scaled(inner.value, factor);
   const CalcError error = error_in(value);
   if (error != CalcError::none) return calc_fault(error, words_for(error));
-  return of_value(std::move(value));
+  return of_value(value);
 }
 
 Result Evaluator::compute_binary(const Node& node, Want want) {
@@ -274,7 +230,7 @@ Result Evaluator::compute_binary(const Node& node, Want want) {
   Any value = apply(node.op, left.value, right.value);
   const CalcError error = error_in(value);
   if (error != CalcError::none) return calc_fault(error, words_for(error));
-  return of_value(std::move(value));
+  return of_value(value);
 }
 
 std::string Evaluator::blank_note(std::size_t from) const {
@@ -327,12 +283,7 @@ Result Evaluator::compute_engine_call(const Node& node, Want want) {
     if (area && !area->single()) {
       // Calc calls no add-in with a range that holds an error.
       if (const auto failing = document_.first_error(*area)) {
-        Fault fault;
-        fault.origin = Fault::Origin::cell;
-        fault.error = CalcError::parameter_list;
-        fault.cell = *failing;
-        fault.in_range = true;
-        stopped = of_fault(std::move(fault));
+        stopped = cell_fault(CalcError::parameter_list, *failing, true);
         break;
       }
     }

@@ -16,31 +16,10 @@
 #include "calc_error.hpp"
 #include "engine.hpp"
 #include "why_document.hpp"
+#include "why_result.hpp"
 #include "why_tree.hpp"
 
 namespace busbar::addin {
-
-// Where an error comes from.
-struct Fault {
-  enum class Origin {
-    engine,  // a Busbar call; `text` is the engine's explanation
-    cell,    // `cell` holds an error, alone or inside a range
-    calc     // an operator or a function of Calc; `text` says which
-  };
-  Origin origin = Origin::calc;
-  CalcError error = CalcError::value;
-  std::string text;
-  Address cell;
-  bool in_range = false;
-};
-
-struct Result {
-  com::sun::star::uno::Any value;
-  std::optional<Fault> fault;  // set exactly when the value is an error
-  std::string unknown;         // not empty: why there is no value
-
-  [[nodiscard]] bool usable() const { return !fault && unknown.empty(); }
-};
 
 struct Budget {
   std::size_t calls = 512;        // of the engine and of Calc's functions

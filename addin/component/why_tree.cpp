@@ -30,7 +30,6 @@ using com::sun::star::sheet::SingleReference;
 using com::sun::star::sheet::XFormulaOpCodeMapper;
 using com::sun::star::uno::Any;
 using com::sun::star::uno::Reference;
-using com::sun::star::uno::Sequence;
 using com::sun::star::uno::UNO_QUERY_THROW;
 using rtl::OUString;
 
