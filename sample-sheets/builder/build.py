@@ -6,7 +6,9 @@ Needs the Python of LibreOffice's UNO bridge (Debian: /usr/bin/python3 with pyth
 
 import argparse
 import os
+import shutil
 import sys
+import tempfile
 
 HERE = os.path.dirname(os.path.abspath(__file__))
 SAMPLES = os.path.dirname(HERE)
@@ -37,13 +39,14 @@ def main():
     with Profile(given.profile) as profile:
         if not given.profile:
             profile.with_extension(given.oxt)
-        with Office(profile.folder) as office:
+        with Office(profile.folder) as office, tempfile.TemporaryDirectory() as scratch:
             for workbook in WORKBOOKS:
-                path = os.path.join(given.out, workbook.FILE)
+                fresh = os.path.join(scratch, workbook.FILE)
                 with shown(office) as document:
                     workbook.build(document)
-                    document.save(path)
-                print(path)
+                    document.save(fresh)
+                # Not saved in place: an office that has the old file open holds a lock on it.
+                print(shutil.copy(fresh, given.out))
 
 
 if __name__ == "__main__":

@@ -123,7 +123,9 @@ def main():
         except CannotInstall as reason:
             print(reason, file=sys.stderr)
             return 2
-        with Office(profile.folder) as office, office.load(given.workbook) as document:
+        # A copy, so that no lock file is left beside the workbook.
+        copy = shutil.copy(given.workbook, profile.folder)
+        with Office(profile.folder) as office, office.load(copy) as document:
             return 1 if report(document, given.workbook, given.folder) else 0
 
 

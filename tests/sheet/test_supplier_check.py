@@ -2,6 +2,7 @@
 
 import importlib
 import os
+import shutil
 import sys
 import zipfile
 from xml.etree import ElementTree
@@ -97,7 +98,7 @@ class SupplierCheckCase(SheetCase):
     def setUp(self):
         super().setUp()
         self.empty = self.document
-        self.document = self.office.load(WORKBOOK)
+        self.document = self.office.load(shutil.copy(WORKBOOK, self.folder))
         self.addCleanup(self._close_empty)
         self.workbook = Workbook(self.document)
 
