@@ -2,7 +2,6 @@
 
 import unicodedata
 
-from com.sun.star.awt.FontWeight import NORMAL
 from com.sun.star.sheet.ValidationAlertStyle import STOP
 from com.sun.star.sheet.ValidationType import LIST
 
@@ -78,10 +77,6 @@ class Page:
         rule.ErrorTitle = title
         rule.ErrorMessage = message
         area.Validation = rule
-
-    def plain(self, address):
-        """Takes the weight of a heading away, for units below the words of a heading."""
-        self.sheet.getCellRangeByName(address).CharWeight = NORMAL
 
     def freeze(self, columns, rows):
         controller = self.document.model.CurrentController
