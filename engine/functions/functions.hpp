@@ -17,6 +17,7 @@ std::span<const Row> limits();
 std::span<const Row> performance();
 std::span<const Row> units();
 std::span<const Row> explanation();
+std::span<const Row> steam_properties();
 
 /// All rows in the order of the chapters above.
 std::span<const Row* const> all();

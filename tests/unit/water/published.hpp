@@ -71,8 +71,10 @@ inline double last_digit(const std::string& text) {
 /// The factor from a printed unit to SI; 0 for a unit that no row should have.
 inline double unit_in_si(const std::string& unit) {
   static const std::map<std::string, double> kUnits = {
-      {"MPa", 1e6},    {"Pa", 1},    {"K", 1},     {"kJ/kg", 1e3}, {"kJ/(kg K)", 1e3},
-      {"J/(kg K)", 1}, {"m3/kg", 1}, {"kg/m3", 1}, {"m/s", 1},     {"", 1},
+      {"MPa", 1e6},       {"Pa", 1},       {"K", 1},     {"kJ/kg", 1e3},
+      {"kJ/(kg K)", 1e3}, {"J/(kg K)", 1}, {"m3/kg", 1}, {"kg/m3", 1},
+      {"m/s", 1},         {"", 1},         {"-", 1},     {"uPa s", 1e-6},
+      {"mW/(m K)", 1e-3}, {"mN/m", 1e-3},  {"nm", 1e-9}, {"kg/(m3 MPa)", 1e-6},
   };
   const auto found = kUnits.find(unit);
   return found == kUnits.end() ? 0 : found->second;

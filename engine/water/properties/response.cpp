@@ -1,0 +1,150 @@
+#include "water/properties/response.hpp"
+
+#include <cmath>
+
+#include "water/constants.hpp"
+#include "water/equations/gibbs.hpp"
+#include "water/equations/helmholtz.hpp"
+#include "water/failure.hpp"
+
+namespace busbar::water {
+
+namespace {
+
+// R7-97(2012), tables 3, 12 and 39, in terms of a = pi g_pi and so on.
+template <class Equation>
+Response gibbs_response(double pressure, double temperature) {
+  const double pi = pressure / Equation::kReducingPressure;
+  const double tau = Equation::kReducingTemperature / temperature;
+  const Gibbs<double> g = Equation::template at<kX | kXX | kY | kYY | kXY>(pi, tau);
+  const double rt = kGasConstant * temperature;
+  const double by_temperature = g.pi_pi1 - tau * g.mixed;  // p (dv/dT)_p / R
+  const double curvature = tau * tau * g.tau2;             // -cp / R
+  Response out;
+  out.isobaric_heat_capacity = -kGasConstant * curvature;
+  out.isochoric_heat_capacity =
+      kGasConstant * (by_temperature * by_temperature / g.pi_pi2 - curvature);
+  const double stiffness =
+      g.pi_pi1 * g.pi_pi1 / (by_temperature * by_temperature / curvature - g.pi_pi2);
+  out.speed_of_sound = std::sqrt(rt * stiffness);
+  out.isentropic_exponent = stiffness / g.pi_pi1;
+  out.isobaric_expansion = by_temperature / (g.pi_pi1 * temperature);
+  out.isothermal_compressibility = -g.pi_pi2 / (g.pi_pi1 * pressure);
+  // v (T beta - 1) / cp with v = R T pi g_pi / p
+  out.joule_thomson = rt / pressure * (by_temperature - g.pi_pi1) / out.isobaric_heat_capacity;
+  return out;
+}
+
+bool is_finite(const Response& at) {
+  return std::isfinite(at.isobaric_heat_capacity) && at.isobaric_heat_capacity > 0 &&
+         std::isfinite(at.isochoric_heat_capacity) && std::isfinite(at.speed_of_sound) &&
+         std::isfinite(at.isentropic_exponent) && std::isfinite(at.joule_thomson) &&
+         std::isfinite(at.isobaric_expansion) && std::isfinite(at.isothermal_compressibility) &&
+         at.isothermal_compressibility > 0;
+}
+
+Response of_phase(const State& state) {
+  switch (state.region) {
+    case Region::liquid:
+      return response_1(state.pressure, state.temperature);
+    case Region::vapour:
+      return response_2(state.pressure, state.temperature);
+    case Region::high_temperature:
+      return response_5(state.pressure, state.temperature);
+    case Region::near_critical:
+      return response_3(1 / state.volume, state.temperature);
+    case Region::two_phase:
+      if (state.pressure > kPressure13) return response_3(1 / state.volume, state.temperature);
+      return state.dryness > 0 ? response_2(state.pressure, state.temperature)
+                               : response_1(state.pressure, state.temperature);
+    case Region::none:
+      break;
+  }
+  return {};
+}
+
+template <double Response::*Member>
+Outcome<double> member(const State& state) {
+  const Outcome<Response> at = response(state);
+  if (!at) return at.failure();
+  return (*at).*Member;
+}
+
+}  // namespace
+
+Response response_1(double pressure, double temperature) {
+  return gibbs_response<Region1Equation>(pressure, temperature);
+}
+
+Response response_2(double pressure, double temperature) {
+  return gibbs_response<Region2Equation>(pressure, temperature);
+}
+
+Response response_5(double pressure, double temperature) {
+  return gibbs_response<Region5Equation>(pressure, temperature);
+}
+
+// R7-97(2012), table 31.
+Response response_3(double density, double temperature) {
+  const double delta = density / kCriticalDensity;
+  const double tau = kCriticalTemperature / temperature;
+  const auto f = Region3Equation::at<kX | kXX | kYY | kXY>(delta, tau);
+  const double rt = kGasConstant * temperature;
+  const double stiffness = 2 * f.delta1 + f.delta2;  // (dp/drho)_T / (R T)
+  const double thermal = f.delta1 - f.mixed;         // (dp/dT)_rho / (rho R)
+  Response out;
+  out.isochoric_heat_capacity = -kGasConstant * f.tau2;
+  out.isobaric_heat_capacity = kGasConstant * (thermal * thermal / stiffness - f.tau2);
+  const double isentropic = stiffness - thermal * thermal / f.tau2;  // (dp/drho)_s / (R T)
+  out.speed_of_sound = std::sqrt(rt * isentropic);
+  out.isentropic_exponent = isentropic / f.delta1;
+  out.isobaric_expansion = thermal / (stiffness * temperature);
+  out.isothermal_compressibility = 1 / (density * rt * stiffness);
+  // v (T beta - 1) / cp, multiplied through with the stiffness, which vanishes at the critical
+  // point
+  out.joule_thomson =
+      (thermal - stiffness) / (density * kGasConstant * (thermal * thermal - f.tau2 * stiffness));
+  return out;
+}
+
+Outcome<Response> response(const State& state) {
+  if (state.region == Region::two_phase && state.dryness > 0 && state.dryness < 1) {
+    return make_failure(Fault::missing, 0,
+                        "is two-phase with dryness {0}: there is no such property of a mixture; "
+                        "dryness 0 and 1 have it",
+                        {state.dryness, Quantity::fraction});
+  }
+  const Response at = of_phase(state);
+  if (!is_finite(at)) {
+    return make_failure(Fault::missing, 0,
+                        "is at the critical point ({0}, {1}), where IAPWS-IF97 gives this property "
+                        "no finite value",
+                        {kCriticalPressure, Quantity::pressure},
+                        {kCriticalTemperature, Quantity::temperature});
+  }
+  return at;
+}
+
+Outcome<double> isobaric_heat_capacity(const State& state) {
+  return member<&Response::isobaric_heat_capacity>(state);
+}
+Outcome<double> isochoric_heat_capacity(const State& state) {
+  return member<&Response::isochoric_heat_capacity>(state);
+}
+Outcome<double> speed_of_sound(const State& state) {
+  return member<&Response::speed_of_sound>(state);
+}
+Outcome<double> isentropic_exponent(const State& state) {
+  return member<&Response::isentropic_exponent>(state);
+}
+Outcome<double> joule_thomson(const State& state) {
+  return member<&Response::joule_thomson>(state);
+}
+Outcome<double> isobaric_expansion(const State& state) {
+  return member<&Response::isobaric_expansion>(state);
+}
+Outcome<double> isothermal_compressibility(const State& state) {
+  return member<&Response::isothermal_compressibility>(state);
+}
+
+}  // namespace busbar::water
