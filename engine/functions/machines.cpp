@@ -68,8 +68,7 @@ void explain_pump(const Slot* in, const Result& result, UnitSet units, std::stri
   if (result.si > 1) {
     text +=
         " Above 1: as read, the pump would take less than the isentropic power, which the second "
-        "law "
-        "rules out for an adiabatic machine; weigh the uncertainty of the temperature rise.";
+        "law rules out for an adiabatic machine; weigh the uncertainty of the temperature rise.";
   } else if (result.si < 0) {
     text += " Below 0: as read, the fluid lost enthalpy instead of taking it.";
   }
