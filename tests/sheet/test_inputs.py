@@ -2,7 +2,8 @@
 names function, argument and limit, and an office that lives on.
 
 The errors expected: #N/A for a missing value, #VALUE! for a wrong kind, Err:502 for a zero or blank
-that cannot be and for what is out of range, Err:523 for an iteration at its cap. The limits are the ones that the catalogue states for each argument.
+that cannot be and for what is out of range, Err:523 for an iteration at its cap. The limits are the
+ones that the catalogue states for each argument.
 """
 
 import collections
