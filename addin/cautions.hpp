@@ -1,7 +1,6 @@
 // The cautions that users meet: in the help, in the function reference and in the box "About
 // Busbar".
-#ifndef BUSBAR_ADDIN_CAUTIONS_HPP
-#define BUSBAR_ADDIN_CAUTIONS_HPP
+#pragma once
 
 #include <string_view>
 
@@ -14,4 +13,3 @@ inline constexpr std::string_view kCautions =
 
 }  // namespace busbar::addin
 
-#endif

@@ -1,6 +1,5 @@
 // The two entries that the generated methods hand every call to. Neither throws.
-#ifndef BUSBAR_ADDIN_ANSWER_HPP
-#define BUSBAR_ADDIN_ANSWER_HPP
+#pragma once
 
 #include <com/sun/star/beans/XPropertySet.hpp>
 #include <com/sun/star/table/XCellRange.hpp>
@@ -26,5 +25,3 @@ com::sun::star::uno::Any answer_cell(
     const com::sun::star::uno::Reference<com::sun::star::table::XCellRange>& cell) noexcept;
 
 }  // namespace busbar::addin
-
-#endif

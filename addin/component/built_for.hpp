@@ -1,6 +1,5 @@
 // What the generated registration was written for; the generated source defines it.
-#ifndef BUSBAR_ADDIN_BUILT_FOR_HPP
-#define BUSBAR_ADDIN_BUILT_FOR_HPP
+#pragma once
 
 #include <cstddef>
 #include <cstdint>
@@ -17,5 +16,3 @@ struct BuiltFor {
 extern const BuiltFor kBuiltFor;
 
 }  // namespace busbar::addin
-
-#endif

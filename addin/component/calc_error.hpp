@@ -1,7 +1,6 @@
 // Calc's errors as they travel through the add-in interface: a quiet NaN whose low 32 bits hold the
 // code. Such a number is made and read here alone; arithmetic does not keep the code.
-#ifndef BUSBAR_ADDIN_CALC_ERROR_HPP
-#define BUSBAR_ADDIN_CALC_ERROR_HPP
+#pragma once
 
 #include <bit>
 #include <cstdint>
@@ -46,5 +45,3 @@ inline constexpr std::uint64_t kErrorHighWord = 0x7FF80000;
 [[nodiscard]] std::string shown(CalcError error);
 
 }  // namespace busbar::addin
-
-#endif

@@ -1,7 +1,6 @@
 // The engine as it was loaded, checked once against the engine that the registration was written
 // for.
-#ifndef BUSBAR_ADDIN_ENGINE_HPP
-#define BUSBAR_ADDIN_ENGINE_HPP
+#pragma once
 
 #include <busbar.h>
 
@@ -24,5 +23,3 @@ using Value = std::unique_ptr<busbar_value, FreeValue>;
 [[nodiscard]] const busbar_function* engine_function(std::size_t number);
 
 }  // namespace busbar::addin
-
-#endif

@@ -4,8 +4,7 @@
 // empty text inside a table is a blank (Calc hands blank cells of a range over as empty texts).
 // Engine -> Calc: a single cell is a scalar, a grid is a table; errors are Calc errors, blanks are
 // empty texts, logicals are 1 and 0.
-#ifndef BUSBAR_ADDIN_MARSHAL_HPP
-#define BUSBAR_ADDIN_MARSHAL_HPP
+#pragma once
 
 #include <com/sun/star/uno/Any.hxx>
 
@@ -34,5 +33,3 @@ enum class Taken {
 [[nodiscard]] com::sun::star::uno::Any to_calc(CalcError error);
 
 }  // namespace busbar::addin
-
-#endif

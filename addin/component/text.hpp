@@ -1,7 +1,7 @@
-// UTF-8 (engine) and UTF-16 (office). Both directions take anything: what is no text (a lone
-// surrogate, an overlong or cut sequence) becomes U+FFFD, so that no input is lost or refused here.
-#ifndef BUSBAR_ADDIN_TEXT_HPP
-#define BUSBAR_ADDIN_TEXT_HPP
+// UTF-8 (engine) and UTF-16 (office), by the office's own converters. Both directions take
+// anything: what is no text becomes a replacement character ("?" or U+FFFD), so that no input is
+// refused here.
+#pragma once
 
 #include <rtl/ustring.hxx>
 #include <string>
@@ -14,5 +14,3 @@ void append_utf8(std::string& out, const rtl::OUString& text);
 [[nodiscard]] rtl::OUString to_utf16(std::string_view text);
 
 }  // namespace busbar::addin
-
-#endif

@@ -1,6 +1,5 @@
 // WHY: what happened in a cell, in a sentence.
-#ifndef BUSBAR_ADDIN_WHY_HPP
-#define BUSBAR_ADDIN_WHY_HPP
+#pragma once
 
 #include <com/sun/star/table/XCellRange.hpp>
 #include <com/sun/star/uno/Reference.hxx>
@@ -17,5 +16,3 @@ namespace busbar::addin {
     const com::sun::star::uno::Reference<com::sun::star::table::XCellRange>& cell);
 
 }  // namespace busbar::addin
-
-#endif

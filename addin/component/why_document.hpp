@@ -1,6 +1,5 @@
 // A spreadsheet as WHY sees it: cells by address, their tokens, names, and what ranges hold.
-#ifndef BUSBAR_ADDIN_WHY_DOCUMENT_HPP
-#define BUSBAR_ADDIN_WHY_DOCUMENT_HPP
+#pragma once
 
 #include <com/sun/star/lang/XMultiServiceFactory.hpp>
 #include <com/sun/star/sheet/FormulaToken.hpp>
@@ -113,5 +112,3 @@ class SheetDocument {
 [[nodiscard]] std::string column_name(sal_Int32 column);
 
 }  // namespace busbar::addin
-
-#endif

@@ -3,8 +3,7 @@
 // It knows Busbar's functions (through the engine), Calc's operators and, through Calc itself,
 // Calc's built-in functions. What it cannot compute it calls unknown, never a guess. All work is
 // counted against a budget that one explanation shares.
-#ifndef BUSBAR_ADDIN_WHY_EVALUATOR_HPP
-#define BUSBAR_ADDIN_WHY_EVALUATOR_HPP
+#pragma once
 
 #include <com/sun/star/uno/Any.hxx>
 #include <com/sun/star/uno/XComponentContext.hpp>
@@ -97,5 +96,3 @@ class Evaluator {
 };
 
 }  // namespace busbar::addin
-
-#endif

@@ -1,7 +1,6 @@
 // Calc's operators on values as WHY carries them: numbers, texts, logicals and tables of these. An
 // error is a number that carries it (calc_error.hpp).
-#ifndef BUSBAR_ADDIN_WHY_OPERATORS_HPP
-#define BUSBAR_ADDIN_WHY_OPERATORS_HPP
+#pragma once
 
 #include <com/sun/star/uno/Any.hxx>
 #include <com/sun/star/uno/Sequence.hxx>
@@ -35,5 +34,3 @@ struct Shape {
 [[nodiscard]] double as_number(const com::sun::star::uno::Any& value);
 
 }  // namespace busbar::addin
-
-#endif

@@ -1,7 +1,6 @@
 // What a part of a formula comes to when WHY computes it again: a value, an error with its origin,
 // or the honest answer that it is not known.
-#ifndef BUSBAR_ADDIN_WHY_RESULT_HPP
-#define BUSBAR_ADDIN_WHY_RESULT_HPP
+#pragma once
 
 #include <com/sun/star/uno/Any.hxx>
 #include <optional>
@@ -82,5 +81,3 @@ struct Result {
 }
 
 }  // namespace busbar::addin
-
-#endif

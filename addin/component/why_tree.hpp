@@ -1,6 +1,5 @@
 // A formula as a tree, from the tokens that Calc compiled it to.
-#ifndef BUSBAR_ADDIN_WHY_TREE_HPP
-#define BUSBAR_ADDIN_WHY_TREE_HPP
+#pragma once
 
 #include <busbar.h>
 
@@ -88,5 +87,3 @@ struct TokenNumbers {
                                  const TokenNumbers& numbers);
 
 }  // namespace busbar::addin
-
-#endif

@@ -1,6 +1,5 @@
 // The engine's catalogue, read once through the C interface and checked for what Calc can register.
-#ifndef BUSBAR_ADDIN_EXPORTER_CATALOGUE_HPP
-#define BUSBAR_ADDIN_EXPORTER_CATALOGUE_HPP
+#pragma once
 
 #include <array>
 #include <cstddef>
@@ -64,5 +63,3 @@ struct Catalogue {
 [[nodiscard]] std::string parameter_identifier(std::string_view argument_name);
 
 }  // namespace busbar::exporter
-
-#endif

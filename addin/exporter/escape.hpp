@@ -1,6 +1,5 @@
 // Quoting of catalogue texts for the languages that the exporter writes.
-#ifndef BUSBAR_ADDIN_EXPORTER_ESCAPE_HPP
-#define BUSBAR_ADDIN_EXPORTER_ESCAPE_HPP
+#pragma once
 
 #include <string>
 #include <string_view>
@@ -20,5 +19,3 @@ namespace busbar::exporter {
 [[nodiscard]] std::string cpp_literal(std::string_view text);
 
 }  // namespace busbar::exporter
-
-#endif

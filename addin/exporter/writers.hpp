@@ -1,6 +1,5 @@
 // What the exporter writes from the catalogue, one function a file.
-#ifndef BUSBAR_ADDIN_EXPORTER_WRITERS_HPP
-#define BUSBAR_ADDIN_EXPORTER_WRITERS_HPP
+#pragma once
 
 #include <map>
 #include <string>
@@ -28,5 +27,3 @@ namespace busbar::exporter {
 [[nodiscard]] std::string kind_in_words(const Argument& argument);
 
 }  // namespace busbar::exporter
-
-#endif
