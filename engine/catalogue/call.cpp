@@ -235,13 +235,13 @@ class Caller {
     return UnitSet::metric;
   }
 
-  // Adds the word that a failing kernel was given.
+  // Adds the word that a failing kernel was given, or the tag of the stream.
   [[nodiscard]] Trouble about(const Failure& failure) const {
     Trouble found{failure, {}};
-    const std::size_t index = failure.argument;
-    if (index > 0 && index <= row_.types.size() && row_.types[index - 1].kind == Kind::word) {
-      found.word = quotable(slots_[index - 1].word());
-    }
+    if (failure.argument == 0 || failure.argument > row_.types.size()) return found;
+    const std::size_t index = failure.argument - std::size_t{1};
+    if (row_.types[index].kind == Kind::word) found.word = quotable(slots_[index].word());
+    if (row_.types[index].kind == Kind::stream) found.word = slots_[index].stream->tag.text();
     return found;
   }
 

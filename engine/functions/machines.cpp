@@ -93,8 +93,9 @@ constexpr Source kTurbine{kBook, "5th ed.", "section 6.8, isentropic turbine eff
 constexpr Source kPump{kBook, "5th ed.", "section 6.8, isentropic pump efficiency"};
 constexpr Source kThrottle{kBook, "5th ed.", "section 4.3, throttling devices"};
 constexpr Source kEnergy{kBook, "5th ed.", "section 4.2, steady-state energy rate balance"};
-constexpr Source kDefinition{"Definition of the mechanical efficiency", "IEC 60953-1",
-                             "power at the coupling over power of the fluid"};
+constexpr Source kDefinition{
+    "Definition", "common practice, no source",
+    "mechanical efficiency = power at the coupling over power of the fluid"};
 
 constexpr Argument kInlet{"inlet", "Stream before the machine"};
 constexpr Argument kOutlet{"outlet", "Stream after the machine"};

@@ -100,15 +100,15 @@ constexpr Argument kEfficiencyBasis[] = {
 constexpr Argument kRateBasis[] = {
     {"heat rate", "Fuel energy over output, in any unit", kAboveZero}, kFrom, kTo, kHigher, kLower};
 
-constexpr Source kRate{"ISO 80000-5:2019 for the quantities; definition of the heat rate",
-                       "common practice", "heat rate = 1/efficiency, 3600 kJ = 1 kWh"};
+constexpr Source kRate{"Definition, with 1 kWh = 3600 kJ by the SI Brochure", "9th ed. 2019",
+                       "heat rate = 1/efficiency"};
 constexpr Source kBasis{"ISO 1928:2020, gross and net calorific value at constant pressure", "",
                         "fuel energy = mass times heating value, on either basis"};
 constexpr Source kChain{"Conservation of energy along a chain of conversions", "",
                         "the product of the links"};
 constexpr Source kGeneratorSource{"IEC 60034-2-1", "2014", "efficiency = output over input"};
-constexpr Source kNetSource{"ISO 12759 and IEC 60953-1 use the same terms; definition",
-                            "common practice", "net = gross minus auxiliary power"};
+constexpr Source kNetSource{"Definition", "common practice, no source",
+                            "net = gross at the generator terminals minus auxiliary power"};
 
 constexpr const char* kBasisNote =
     "Holds for output over fuel energy (plant, unit, engine). It does not hold for a boiler "
