@@ -18,6 +18,7 @@ std::span<const Row> performance();
 std::span<const Row> units();
 std::span<const Row> explanation();
 std::span<const Row> steam_properties();
+std::span<const Row> steam_transport();
 
 /// All rows in the order of the chapters above.
 std::span<const Row* const> all();

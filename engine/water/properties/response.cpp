@@ -43,26 +43,6 @@ bool is_finite(const Response& at) {
          at.isothermal_compressibility > 0;
 }
 
-Response of_phase(const State& state) {
-  switch (state.region) {
-    case Region::liquid:
-      return response_1(state.pressure, state.temperature);
-    case Region::vapour:
-      return response_2(state.pressure, state.temperature);
-    case Region::high_temperature:
-      return response_5(state.pressure, state.temperature);
-    case Region::near_critical:
-      return response_3(1 / state.volume, state.temperature);
-    case Region::two_phase:
-      if (state.pressure > kPressure13) return response_3(1 / state.volume, state.temperature);
-      return state.dryness > 0 ? response_2(state.pressure, state.temperature)
-                               : response_1(state.pressure, state.temperature);
-    case Region::none:
-      break;
-  }
-  return {};
-}
-
 template <double Response::*Member>
 Outcome<double> member(const State& state) {
   const Outcome<Response> at = response(state);
@@ -107,6 +87,26 @@ Response response_3(double density, double temperature) {
   return out;
 }
 
+Response response_of_phase(const State& state) {
+  switch (state.region) {
+    case Region::liquid:
+      return response_1(state.pressure, state.temperature);
+    case Region::vapour:
+      return response_2(state.pressure, state.temperature);
+    case Region::high_temperature:
+      return response_5(state.pressure, state.temperature);
+    case Region::near_critical:
+      return response_3(1 / state.volume, state.temperature);
+    case Region::two_phase:
+      if (state.pressure > kPressure13) return response_3(1 / state.volume, state.temperature);
+      return state.dryness > 0 ? response_2(state.pressure, state.temperature)
+                               : response_1(state.pressure, state.temperature);
+    case Region::none:
+      break;
+  }
+  return {};
+}
+
 Outcome<Response> response(const State& state) {
   if (state.region == Region::two_phase && state.dryness > 0 && state.dryness < 1) {
     return make_failure(Fault::missing, 0,
@@ -114,7 +114,7 @@ Outcome<Response> response(const State& state) {
                         "dryness 0 and 1 have it",
                         {state.dryness, Quantity::fraction});
   }
-  const Response at = of_phase(state);
+  const Response at = response_of_phase(state);
   if (!is_finite(at)) {
     return make_failure(Fault::missing, 0,
                         "is at the critical point ({0}, {1}), where IAPWS-IF97 gives this property "

@@ -26,6 +26,10 @@ struct Response {
 /// between the coefficients: IAPWS AN3-07(2018).
 Outcome<Response> response(const State& state);
 
+/// The same without a check: above dryness 0 saturated vapour answers for a mixture, and next to
+/// the critical point numbers may be infinite or negative.
+Response response_of_phase(const State& state);
+
 // The basic equations at pressure (Pa), or density (kg/m3), and temperature (K).
 Response response_1(double pressure, double temperature);
 Response response_2(double pressure, double temperature);
