@@ -46,7 +46,8 @@ class Source {
     return value;
   }
   std::string text() {
-    const std::size_t length = std::min<std::size_t>(byte(), left_.size());
+    const std::size_t wanted = byte();
+    const std::size_t length = std::min(wanted, left_.size());
     std::string value = text_of(left_.first(length));
     left_ = left_.subspan(length);
     return value;
@@ -143,9 +144,10 @@ support::Value one_cell(Source& source) {
       return support::call("STEAM_AT_DRYNESS",
                            {Value::number(p), Value::number(source.byte() / 255.0)});
     }
-    default:
-      return Value::number(kTelling[source.byte() % std::size(kTelling)] *
-                           (1 + 1e-6 * (source.byte() - 128)));
+    default: {
+      const double telling = kTelling[source.byte() % std::size(kTelling)];
+      return Value::number(telling * (1 + 1e-6 * (source.byte() - 128)));
+    }
   }
 }
 
