@@ -10,16 +10,21 @@ namespace busbar::addin {
 
 enum class CalcError : std::uint32_t {
   none = 0,
-  argument = 502,         // Err:502
-  number = 503,           // #NUM!
-  parameter_list = 504,   // Err:504
-  circular = 522,         // Err:522
-  convergence = 523,      // Err:523
-  value = 519,            // #VALUE!
-  reference = 524,        // #REF!
-  name = 525,             // #NAME?
-  division = 532,         // #DIV/0!
-  not_available = 0x7fff  // #N/A
+  illegal_character = 501,  // Err:501
+  argument = 502,           // Err:502
+  number = 503,             // #NUM!
+  parameter_list = 504,     // Err:504
+  unpaired = 508,           // Err:508
+  operator_missing = 509,   // Err:509
+  operand_missing = 510,    // Err:510
+  variable_missing = 511,   // Err:511
+  circular = 522,           // Err:522
+  convergence = 523,        // Err:523
+  value = 519,              // #VALUE!
+  reference = 524,          // #REF!
+  name = 525,               // #NAME?
+  division = 532,           // #DIV/0!
+  not_available = 0x7fff    // #N/A
 };
 
 inline constexpr std::uint64_t kErrorHighWord = 0x7FF80000;

@@ -8,8 +8,10 @@
 #include "engine.hpp"
 #include "marshal.hpp"
 #include "text.hpp"
+#include "why_circle.hpp"
 #include "why_document.hpp"
 #include "why_evaluator.hpp"
+#include "why_formula_errors.hpp"
 #include "why_tree.hpp"
 
 namespace busbar::addin {
@@ -24,8 +26,9 @@ using com::sun::star::uno::XComponentContext;
 using com::sun::star::uno::XInterface;
 using rtl::OUString;
 
-constexpr int kMostHops = 64;                 // cells that an error is followed through
-constexpr std::size_t kLongestFormula = 160;  // of a formula that is quoted
+constexpr int kMostHops = 64;                  // cells that an error is followed through
+constexpr std::size_t kCircleOfWorking = 256;  // cells behind a working one, searched for a circle
+constexpr std::size_t kLongestFormula = 160;   // of a formula that is quoted
 constexpr std::size_t kLongestAnswer = 4000;
 
 // Cut at a character, with a sign that it was.
@@ -82,7 +85,7 @@ class Investigation {
     Address at = start;
     for (int hop = 0; hop < kMostHops; ++hop) {
       if (!visited.insert(at).second)
-        return sentence(start, at, relation, "is part of a circle of references.", range_note);
+        return sentence(start, at, relation, round_trip(at), range_note);
       const Step step = look_at(at);
       if (!step.follow) return sentence(start, at, relation, step.text, range_note);
       if (relation.empty()) {
@@ -108,6 +111,13 @@ class Investigation {
     std::string out = document_.name_of(start, start.sheet);
     if (found != start) out += relation + document_.name_of(found, start.sheet);
     return shortened(out + ": " + text + (found != start ? note : ""), kLongestAnswer);
+  }
+
+  // A circle that the hops from error to error came upon.
+  [[nodiscard]] std::string round_trip(const Address& cell) const {
+    const auto between = circle_through(document_, cell);
+    if (!between) return "is part of a circle of references.";
+    return circle_in_words(document_, cell, *between);
   }
 
   Step look_at(const Address& cell) {
@@ -143,15 +153,49 @@ class Investigation {
     Step step;
     const CalcError error = document_.error(cell);
     if (error == CalcError::circular) {
-      step.text = "the formula refers to itself, directly or through other cells (Err:522).";
-      return step;
+      if (const auto between = circle_through(document_, cell)) {
+        step.text = circle_in_words(document_, cell, *between);
+        return step;
+      }
     }
     const CellFormula formula = document_.formula(cell);
     const Node tree = parse_formula(formula.tokens, formula.base, token_numbers(document_));
     Evaluator evaluator(document_, context_, cell, formula, budget_);
     const Result result = evaluator.evaluate(tree);
-    if (error != CalcError::none) return failing(cell, error, result);
-    return working(cell, tree, result, evaluator);
+    if (tree.kind == NodeKind::elsewhere) return link(cell, error);
+    if (error != CalcError::none) return failing(cell, error, formula, tree, result);
+    // IFERROR takes Calc's error about a circle away, too, and leaves the start value.
+    if (!document_.iterates()) {
+      if (const auto between = circle_through(document_, cell, kCircleOfWorking)) {
+        step.text = "the cell shows a value that may be a start value: " +
+                    circle_in_words(document_, cell, *between);
+        return step;
+      }
+    }
+    return working(tree, result, evaluator);
+  }
+
+  // A cell that shows a cell of another file and nothing else.
+  [[nodiscard]] Step link(const Address& cell, CalcError error) const {
+    Step step;
+    if (error == CalcError::reference) {
+      step.text =
+          "the cell shows a cell of another file, and either Calc does not find the file, its "
+          "sheet "
+          "or the cell, or that cell itself holds #REF!. The formula is " +
+          quoted_formula(cell) + ".";
+      return step;
+    }
+    if (error != CalcError::none) {
+      step.text = "the cell shows a cell of another file, which holds " + shown(error) +
+                  ": open that file and ask WHY there. The formula is " + quoted_formula(cell) +
+                  ".";
+      return step;
+    }
+    step.text = "the cell shows a value of another file.";
+    const OUString text = document_.text(cell);
+    if (looks_like_stream(to_utf8(text))) step.text.append(" ").append(explained_stream(text));
+    return step;
   }
 
   static std::string sentence_of(const Fault& fault) {
@@ -167,26 +211,28 @@ class Investigation {
     return step;
   }
 
-  Step failing(const Address& cell, CalcError error, const Result& result) const {
+  // Whether what was found is what the cell shows: an error behind it, or the same error.
+  static bool explains(const Result& result, CalcError error) {
+    if (!result.fault) return false;
+    return result.fault->origin == Fault::Origin::cell || result.fault->error == error;
+  }
+
+  Step failing(const Address& cell, CalcError error, const CellFormula& formula, const Node& tree,
+               const Result& result) {
     Step step;
-    if (result.fault) {
-      switch (result.fault->origin) {
-        case Fault::Origin::cell:
-          return followed(*result.fault);
-        case Fault::Origin::engine:
-          step.text = result.fault->text;
-          return step;
-        case Fault::Origin::calc:
-          step.text = shown(error) + " comes from Calc's own part of the formula " +
-                      quoted_formula(cell) + ": " + result.fault->text + ".";
-          return step;
-      }
+    if (result.fault && result.fault->origin == Fault::Origin::cell) return followed(*result.fault);
+    if (step.text = unreadable(cell, error, formula); !step.text.empty()) return step;
+    if (explains(result, error)) return told(cell, error, *result.fault);
+    // The element that the cell shows does not fail by itself: perhaps the call as a whole does.
+    Evaluator whole(document_, context_, cell, formula, budget_, Lifting::whole);
+    const Result again = whole.evaluate(tree);
+    if (explains(again, error)) return told(cell, error, *again.fault);
+    if (const auto between = circle_through(document_, cell)) {
+      step.text = circle_in_words(document_, cell, *between);
+      return step;
     }
-    if (error == CalcError::name)
-      step.text =
-          "the formula holds a name that Calc does not know (#NAME?): " + quoted_formula(cell) +
-          ".";
-    else if (!result.unknown.empty())
+    if (result.fault) return told(cell, error, *result.fault);
+    if (!result.unknown.empty())
       step.text = "the cell shows " + shown(error) +
                   ", but WHY cannot take its formula apart: it " + result.unknown +
                   ". The formula is " + quoted_formula(cell) + ".";
@@ -198,8 +244,27 @@ class Investigation {
     return step;
   }
 
-  static Step working(const Address&, const Node& tree, const Result& result,
-                      const Evaluator& evaluator) {
+  // What kept Calc from computing the formula at all; empty where nothing did.
+  [[nodiscard]] std::string unreadable(const Address& cell, CalcError error,
+                                       const CellFormula& formula) const {
+    const std::string words = error == CalcError::name
+                                  ? unknown_name_in_words(formula.tokens, token_numbers(document_))
+                                  : unreadable_in_words(error);
+    if (words.empty()) return words;
+    return words + " The formula is " + quoted_formula(cell) + ".";
+  }
+
+  Step told(const Address& cell, CalcError error, const Fault& fault) const {
+    if (fault.origin == Fault::Origin::cell) return followed(fault);
+    Step step;
+    step.text = fault.text;
+    if (fault.origin == Fault::Origin::calc)
+      step.text = shown(error) + " comes from Calc's own part of the formula " +
+                  quoted_formula(cell) + ": " + fault.text + ".";
+    return step;
+  }
+
+  static Step working(const Node& tree, const Result& result, const Evaluator& evaluator) {
     Step step;
     if (evaluator.hidden()) {
       const Fault& hidden = *evaluator.hidden();

@@ -4,6 +4,7 @@
 #include <com/sun/star/beans/XPropertySet.hpp>
 #include <com/sun/star/container/XIndexAccess.hpp>
 #include <com/sun/star/container/XNamed.hpp>
+#include <com/sun/star/sheet/CellFlags.hpp>
 #include <com/sun/star/sheet/FormulaResult.hpp>
 #include <com/sun/star/sheet/XArrayFormulaTokens.hpp>
 #include <com/sun/star/sheet/XCellRangeAddressable.hpp>
@@ -215,6 +216,29 @@ std::optional<Address> SheetDocument::first_error(const Area& area) const {
     if (inside && (!first || start < *first)) first = start;
   }
   return first;
+}
+
+std::vector<Address> SheetDocument::formula_cells(const Area& area, std::size_t most) const {
+  std::vector<Address> cells;
+  if (!exists(area.first)) return cells;
+  const Reference<XCellRangesQuery> query(range(area), UNO_QUERY_THROW);
+  const Reference<XSheetCellRanges> found =
+      query->queryContentCells(com::sun::star::sheet::CellFlags::FORMULA);
+  if (!found.is()) return cells;
+  for (const CellRangeAddress& part : found->getRangeAddresses())
+    for (sal_Int32 row = part.StartRow; row <= part.EndRow; ++row)
+      for (sal_Int32 column = part.StartColumn; column <= part.EndColumn; ++column) {
+        if (cells.size() == most) return cells;
+        cells.push_back({part.Sheet, row, column});
+      }
+  return cells;
+}
+
+bool SheetDocument::iterates() const {
+  const Reference<XPropertySet> properties(document_, UNO_QUERY_THROW);
+  bool on = false;
+  properties->getPropertyValue("IsIterationEnabled") >>= on;
+  return on;
 }
 
 Area SheetDocument::used_part(const Area& area) const {

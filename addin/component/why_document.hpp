@@ -13,6 +13,7 @@
 #include <optional>
 #include <string>
 #include <tuple>
+#include <vector>
 
 #include "calc_error.hpp"
 
@@ -81,6 +82,10 @@ class SheetDocument {
   [[nodiscard]] com::sun::star::uno::Any table(const Area& area) const;
   // The first cell with an error, row by row.
   [[nodiscard]] std::optional<Address> first_error(const Area& area) const;
+  // The formulas in an area, `most` of them at the most, row by row within each block of them.
+  [[nodiscard]] std::vector<Address> formula_cells(const Area& area, std::size_t most) const;
+  // Whether the document computes circles step by step.
+  [[nodiscard]] bool iterates() const;
   // The area without the rows and columns at its end that nothing fills.
   [[nodiscard]] Area used_part(const Area& area) const;
 

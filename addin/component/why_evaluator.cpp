@@ -1,6 +1,7 @@
 #include "why_evaluator.hpp"
 
 #include <algorithm>
+#include <string_view>
 #include <utility>
 
 #include "marshal.hpp"
@@ -41,7 +42,7 @@ const char* words_for(CalcError error) {
 // Arguments that are lifted over a range take one element a result; the others take it whole.
 bool is_lifted(std::int32_t kind) {
   return kind != BUSBAR_ARGUMENT_NUMBERS && kind != BUSBAR_ARGUMENT_STREAMS &&
-         kind != BUSBAR_ARGUMENT_CELL;
+         kind != BUSBAR_ARGUMENT_CELL && kind != BUSBAR_ARGUMENT_OPTIONS;
 }
 
 std::int32_t kind_of_argument(const busbar_function* function, std::size_t index) {
@@ -53,6 +54,34 @@ std::int32_t kind_of_argument(const busbar_function* function, std::size_t index
 std::string name_of_argument(const busbar_function* function, std::size_t index) {
   if (index >= busbar_argument_count(function)) return "argument " + std::to_string(index + 1);
   return busbar_argument_text(function, index, BUSBAR_ARGUMENT_NAME);
+}
+
+// Whether the ranges that a call is lifted over have one shape. Where they have not, the call fails
+// as a whole, whatever stands in the element that the cell would show.
+bool fit_together(const busbar_function* function, const std::vector<Any>& given) {
+  Shape whole{1, 1};
+  const auto fits = [](std::size_t& most, std::size_t part) {
+    if (part != 1 && most == 1) most = part;
+    return part == 1 || part == most;
+  };
+  for (std::size_t i = 0; i < given.size(); ++i) {
+    if (!given[i].hasValue() || !is_lifted(kind_of_argument(function, i))) continue;
+    const Shape shape = shape_of(given[i]);
+    if (!fits(whole.rows, shape.rows) || !fits(whole.columns, shape.columns)) return false;
+  }
+  return true;
+}
+
+// "H1" and "Stages.H1", as somebody types them who takes the name of a cell for the cell.
+bool is_cell_name(std::string_view text) {
+  text.remove_prefix(text.rfind('.') + 1);  // nothing where there is no point
+  std::size_t letters = 0;
+  const auto is_letter = [](char c) { return (c >= 'A' && c <= 'Z') || (c >= 'a' && c <= 'z'); };
+  const auto is_digit = [](char c) { return c >= '0' && c <= '9'; };
+  while (letters < text.size() && is_letter(text[letters])) ++letters;
+  const std::string_view digits = text.substr(letters);
+  return letters >= 1 && letters <= 3 && !digits.empty() && digits.size() <= 7 &&
+         std::all_of(digits.begin(), digits.end(), is_digit);
 }
 
 }  // namespace
@@ -94,6 +123,11 @@ Result Evaluator::compute_kind(const Node& node, Want want) {
       return calc_fault(CalcError::reference, node.word);
     case NodeKind::refused:
       return unknown("holds " + node.word);
+    case NodeKind::elsewhere:
+      return unknown(engine_calls_open_ == 0
+                         ? "reads another file, and WHY reads this one alone"
+                         : "reads another file, and WHY reads this one alone; with that value in a "
+                           "cell of its own WHY can tell");
     default:
       return unknown(node.word);
   }
@@ -265,64 +299,86 @@ Result Evaluator::failed_call(const Node& node, const std::vector<const busbar_v
   return engine_fault(error, ended(explain(node, arguments)));
 }
 
+// WHY itself inside a formula. Calc hands it nothing but a reference.
+Result Evaluator::about_another_cell(const Node& node) const {
+  const Node* child = node.children.size() == 1 ? &node.children.front() : nullptr;
+  if (child != nullptr && child->kind == NodeKind::elsewhere)
+    return engine_fault(CalcError::parameter_list,
+                        node.word + " explains the cells of its own file alone.");
+  if (child != nullptr && child->kind != NodeKind::literal && child->kind != NodeKind::missing &&
+      child->kind != NodeKind::busbar_call)
+    return unknown("asks " + node.word + " about another cell");
+  rtl::OUString text;
+  const bool named = child != nullptr && (child->value >>= text) && is_cell_name(to_utf8(text));
+  return engine_fault(CalcError::parameter_list,
+                      node.word + " takes one cell by reference; write =" + node.word + "(" +
+                          (named ? to_utf8(text) : "B7") + ")" +
+                          (named ? ", without quotation marks." : "."));
+}
+
+Result Evaluator::computed_arguments(const Node& node, std::vector<Any>& given) {
+  for (const Node& child : node.children) {
+    const auto area = area_behind(child);
+    if (area && !area->single()) {
+      // Calc calls no add-in with a range that holds an error.
+      if (const auto failing = document_.first_error(*area))
+        return cell_fault(CalcError::parameter_list, *failing, true);
+    }
+    if (child.kind == NodeKind::refused) return calc_fault(CalcError::parameter_list, child.word);
+    if (child.kind == NodeKind::elsewhere)
+      return calc_fault(CalcError::parameter_list,
+                        "a reference straight into another file, which Calc hands to no add-in "
+                        "function; put that value into a cell of its own and refer to the cell");
+    Result argument = compute(child, Want::whole);
+    if (!argument.usable()) return argument;
+    given.push_back(argument.value);
+  }
+  return {};
+}
+
+Result Evaluator::element_of_argument(const Node& child, const Any& given, Value& handed) {
+  Result single = pick(given);
+  if (!single.usable()) return single;
+  const auto area = area_behind(child);
+  rtl::OUString text;
+  if (area && !area->single() && (single.value >>= text) && text.isEmpty())
+    handed.reset(busbar_value_create(1, 1));
+  return single;
+}
+
 Result Evaluator::compute_engine_call(const Node& node, Want want) {
   if (busbar_argument_count(node.function) == 1 &&
       busbar_argument_kind(node.function, 0) == BUSBAR_ARGUMENT_CELL)
-    return unknown("asks " + node.word + " about another cell");
+    return about_another_cell(node);
   if (budget_.calls == 0) return unknown("makes more calls than WHY repeats");
   --budget_.calls;
 
   const std::size_t blanks_before = blanks_.size();
+  std::vector<Any> given;
   ++engine_calls_open_;
-  std::vector<Value> values(node.children.size());
-  std::vector<const busbar_value*> arguments(node.children.size());
-  Result stopped;
-  for (std::size_t i = 0; i < values.size() && stopped.usable(); ++i) {
-    const Node& child = node.children[i];
-    const auto area = area_behind(child);
-    if (area && !area->single()) {
-      // Calc calls no add-in with a range that holds an error.
-      if (const auto failing = document_.first_error(*area)) {
-        stopped = cell_fault(CalcError::parameter_list, *failing, true);
-        break;
-      }
-    }
-    if (child.kind == NodeKind::refused) {
-      stopped = calc_fault(CalcError::parameter_list, child.word);
-      break;
-    }
-    Result argument = compute(child, Want::whole);
-    if (!argument.usable()) {
-      stopped = std::move(argument);
-      break;
-    }
-    Any value = argument.value;
-    if (want == Want::element && value.hasValue() &&
-        is_lifted(kind_of_argument(node.function, i))) {
-      Result single = pick(value);
-      if (!single.usable()) {
-        stopped = std::move(single);
-        break;
-      }
+  Result stopped = computed_arguments(node, given);
+  --engine_calls_open_;
+  if (!stopped.usable()) return stopped;
+
+  const bool by_element =
+      want == Want::element && lifting_ == Lifting::element && fit_together(node.function, given);
+  std::vector<Value> values(given.size());
+  std::vector<const busbar_value*> arguments(given.size());
+  for (std::size_t i = 0; i < given.size(); ++i) {
+    Any value = given[i];
+    if (by_element && value.hasValue() && is_lifted(kind_of_argument(node.function, i))) {
+      Result single = element_of_argument(node.children[i], value, values[i]);
+      if (!single.usable()) return single;
       value = single.value;
-      // What stood blank in a range is a missing value, not an empty text.
-      rtl::OUString text;
-      if (area && !area->single() && (value >>= text) && text.isEmpty()) {
-        values[i].reset(busbar_value_create(1, 1));
-        arguments[i] = values[i].get();
-        continue;
-      }
     }
-    const Taken taken = to_engine(value, values[i]);
-    if (taken != Taken::value && taken != Taken::omitted) {
-      stopped =
-          engine_fault(CalcError::value, "the " + name_of_argument(node.function, i) + " of " +
-                                             node.word + " " + in_words(taken) + ".");
+    if (!values[i]) {
+      const Taken taken = to_engine(value, values[i]);
+      if (taken != Taken::value && taken != Taken::omitted)
+        return engine_fault(CalcError::value, "the " + name_of_argument(node.function, i) + " of " +
+                                                  node.word + " " + in_words(taken) + ".");
     }
     arguments[i] = values[i].get();
   }
-  --engine_calls_open_;
-  if (!stopped.usable()) return stopped;
 
   busbar_value* raw = nullptr;
   const std::int32_t status = busbar_call(node.function, arguments.data(), arguments.size(), &raw);

@@ -26,12 +26,22 @@ struct Budget {
   std::size_t nodes = 20'000;     // of formulas
 };
 
+// What a Busbar call gets where the formula names a range and the cell shows one element of the
+// result: the elements that belong to the cell, which costs one computation, or the whole ranges.
+enum class Lifting { element, whole };
+
 class Evaluator {
  public:
   Evaluator(const SheetDocument& document,
             const com::sun::star::uno::Reference<com::sun::star::uno::XComponentContext>& context,
-            const Address& cell, const CellFormula& formula, Budget& budget)
-      : document_(document), context_(context), cell_(cell), formula_(formula), budget_(budget) {}
+            const Address& cell, const CellFormula& formula, Budget& budget,
+            Lifting lifting = Lifting::element)
+      : document_(document),
+        context_(context),
+        cell_(cell),
+        formula_(formula),
+        budget_(budget),
+        lifting_(lifting) {}
 
   // The value of the cell: of an array formula, the element that the cell shows.
   [[nodiscard]] Result evaluate(const Node& root) { return operand(root, Want::element); }
@@ -75,6 +85,12 @@ class Evaluator {
   std::optional<Area> intersection(const Area& area) const;
   Result single_cell(const Address& address);
 
+  // The arguments of a Busbar call as Calc would hand them over, ranges whole.
+  Result computed_arguments(const Node& node, std::vector<com::sun::star::uno::Any>& given);
+  // The element of one of them that belongs to the cell; a blank of a range is a missing value.
+  Result element_of_argument(const Node& child, const com::sun::star::uno::Any& given,
+                             Value& handed);
+  Result about_another_cell(const Node& node) const;
   Result failed_call(const Node& node, const std::vector<const busbar_value*>& arguments,
                      CalcError error);
   std::string explain(const Node& node, const std::vector<const busbar_value*>& arguments);
@@ -86,6 +102,7 @@ class Evaluator {
   Address cell_;
   const CellFormula& formula_;
   Budget& budget_;
+  Lifting lifting_;
   int depth_ = 0;
   int names_open_ = 0;
   int engine_calls_open_ = 0;

@@ -306,10 +306,7 @@ class Parser {
     ExternalReference elsewhere;
     if (data >>= single) return reference_node(single, single, base_);
     if (data >>= both) return reference_node(both.Reference1, both.Reference2, base_);
-    if (data >>= elsewhere)
-      return with_reason(NodeKind::refused,
-                         "a reference straight into another file, which Calc hands to no add-in "
-                         "function; put that value into a cell of its own and refer to the cell");
+    if (data >>= elsewhere) return with_reason(NodeKind::elsewhere, {});
     if (!data.hasValue()) return deleted_cell();
     Node node;
     node.kind = NodeKind::literal;
@@ -372,6 +369,21 @@ const TokenNumbers& token_numbers(const SheetDocument& document) {
   const std::lock_guard lock(*guard);
   if (numbers == nullptr) numbers = new TokenNumbers(ask(document));
   return *numbers;
+}
+
+std::optional<UnknownName> unknown_name(const Tokens& tokens, const TokenNumbers& numbers) {
+  for (sal_Int32 i = 0; i < tokens.getLength(); ++i) {
+    OUString name;
+    const sal_Int32 code = tokens[i].OpCode;
+    if ((code != numbers.bad && code != numbers.no_name) || !(tokens[i].Data >>= name)) continue;
+    sal_Int32 next = i + 1;
+    while (next < tokens.getLength() &&
+           (tokens[next].OpCode == numbers.spaces || tokens[next].OpCode == numbers.whitespace))
+      ++next;
+    return UnknownName{to_utf8(name),
+                       next < tokens.getLength() && tokens[next].OpCode == numbers.open};
+  }
+  return {};
 }
 
 Node parse_formula(const Tokens& tokens, const Address& base, const TokenNumbers& numbers) {

@@ -8,6 +8,7 @@
 #include <com/sun/star/uno/Any.hxx>
 #include <cstddef>
 #include <map>
+#include <optional>
 #include <string>
 #include <vector>
 
@@ -40,9 +41,10 @@ enum class NodeKind {
   negative,
   percent,
   binary,
-  broken,   // an error whichever way it is used; `word` says why
-  refused,  // what Calc hands to no add-in function; `word` says why
-  opaque    // what cannot be taken apart; `word` says why, as the end of a sentence
+  broken,     // an error whichever way it is used; `word` says why
+  refused,    // what Calc hands to no add-in function; `word` says why
+  elsewhere,  // a reference into another file
+  opaque      // what cannot be taken apart; `word` says why, as the end of a sentence
 };
 
 struct Node {
@@ -81,6 +83,14 @@ struct TokenNumbers {
 
 // Asks the document once in the life of the office.
 [[nodiscard]] const TokenNumbers& token_numbers(const SheetDocument& document);
+
+// The first name in a formula that Calc does not know, and whether it is called as a function.
+struct UnknownName {
+  std::string name;
+  bool function = false;
+};
+[[nodiscard]] std::optional<UnknownName> unknown_name(const Tokens& tokens,
+                                                      const TokenNumbers& numbers);
 
 // Never fails: what it cannot read is an opaque node. Relative references count from `base`.
 [[nodiscard]] Node parse_formula(const Tokens& tokens, const Address& base,

@@ -58,15 +58,31 @@ class Arrays(SheetCase):
         self.document.set_array("D1:D3", "=STEAM_ENTHALPY(A1:A3;B1:B2)")
         for row in (1, 2, 3):
             self.assert_error(f"D{row}", "#VALUE!")
-        self.assertTrue(self.why("D1").startswith("D1: "))
+            self.assert_told(f"D{row}", "temperature has 2 rows and 1 columns, which fits no other")
         self.document.set("E1", "=STEAM_ENTHALPY(A1:B2;A1:B3)")
         self.assert_error("E1", "#VALUE!")
+        self.assert_told("E1", "temperature has 3 rows and 2 columns, which fits no other")
+
+    def test_ranges_that_do_not_fit_fail_whatever_stands_in_them(self):
+        # The first cells would fail by themselves too, but the call never came to read them.
+        self.document.fill("A1", [(-5.0, 540.0), ("x", 400.0), (10.0, 300.0)])
+        self.document.set_array("D1:D3", "=STEAM_ENTHALPY(A1:A3;B1:B2)")
+        for row in (1, 2, 3):
+            self.assert_told(f"D{row}", "temperature has 2 rows and 1 columns")
+
+    def assert_told(self, cell, words):
+        """WHY says it of this cell, in the engine's words."""
+        answer = self.why(cell)
+        self.assertTrue(answer.startswith(f"{cell}: STEAM"), answer)
+        self.assertIn(words, answer)
 
     def test_a_range_of_unit_sets_is_refused(self):
         self.document.fill("A1", [("us",), ("si",)])
         self.document.set("B1", "=STEAM(100;540;;A1:A2)")
         self.assert_error("B1", "#VALUE!")
-        self.assertTrue(self.why("B1").startswith("B1: "))
+        self.assert_told("B1", "options is a range; one cell with the unit set is needed")
+        self.document.fill("A1", [("x",), ("y",)])
+        self.assert_told("B1", "options is a range; one cell with the unit set is needed")
 
     def test_inline_arrays(self):
         # In this locale rows of an inline array are set apart by a semicolon, columns by a comma.

@@ -343,6 +343,117 @@ class Why(SheetCase):
         self.document.set("B8", "=STEAM(" + "(" * 100 + "2000" + ")" * 100 + ";540)")
         self.assertIn("WHY", self.why("B8"))
 
+    def test_a_plain_link_into_another_file(self):
+        path = self.path("other.ods")
+        with self.office.new() as other:
+            other.set_all({"A1": 100, "B1": "=STEAM(100;540)", "C1": "=1/0"})
+            other.save(path)
+        there = f"='{file_url(path)}'#$Sheet1."
+        self.document.set("B1", there + "A1")
+        self.assert_why("B1", "B1: the cell shows a value of another file.")
+        self.document.set("B2", there + "B1")
+        self.assertTrue(self.why("B2").startswith("B2: the cell shows a value of another file. "))
+        self.assertIn("IAPWS", self.why("B2"))
+        self.document.set("B3", there + "C1")
+        self.assertIn("which holds #DIV/0!: open that file", self.why("B3"))
+        self.document.set("B4", f"='{file_url(path)}x'#$Sheet1.A1")
+        self.assertIn("does not find the file", self.why("B4"))
+        for row in range(1, 5):
+            self.assertNotIn("cell of its own", self.why(f"B{row}"))
+        # Inside a call that advice helps.
+        self.document.set_all({"C1": there[0] + "STEAM(" + there[1:] + "A1+0;5400)"})
+        self.assert_error("C1", "Err:502")
+        self.assertIn("cell of its own", self.why("C1"))
+
+    def test_why_of_the_name_of_a_cell(self):
+        self.document.add_sheet("Stages")
+        for formula, advice in {
+            '=WHY("H1")': "write =WHY(H1), without quotation marks.",
+            '=WHY("Stages.C4")': "write =WHY(Stages.C4), without quotation marks.",
+            '=WHY("what")': "takes one cell by reference",
+            "=WHY(5)": "takes one cell by reference",
+            "=WHY()": "takes one cell by reference",
+            "=WHY(A1;A2)": "takes one cell by reference",
+        }.items():
+            with self.subTest(formula):
+                self.document.set("B7", formula)
+                self.assert_error("B7", "Err:504")
+                self.assertTrue(self.why("B7").startswith("B7: WHY takes one cell"), self.why("B7"))
+                self.assertIn(advice, self.why("B7"))
+
+    def test_names_that_calc_does_not_know(self):
+        self.document.set("B7", "=STEAM(100;540;;us)")
+        self.assertIn('does not know (#NAME?): us. A word', self.why("B7"))
+        self.assertIn('stands in quotation marks: "us".', self.why("B7"))
+        self.document.set("B8", "=STEAM(100;540;;'us')")
+        self.assertIn('stands in quotation marks: "us".', self.why("B8"))
+        self.document.set("B9", "=STEEM(100;540)")
+        self.assertIn("extension that brings it is not installed", self.why("B9"))
+        self.assertNotIn("quotation", self.why("B9"))
+        # The cell behind passes it on.
+        self.document.set("C1", "=B7*2")
+        self.assertTrue(self.why("C1").startswith("C1 passes on the error of B7: the formula holds"))
+
+    def test_units_typed_into_a_formula(self):
+        for formula, shown, cause in (
+            ("=STEAM(100;540 °C)", "Err:501", "illegal character"),
+            ("=STEAM(100;540°C)", "Err:501", "illegal character"),
+            ("=STEAM(100 bar;540)", "Err:508", "such as a unit"),
+            ("=5 bar", "Err:509", "without an operator"),
+        ):
+            with self.subTest(formula):
+                self.document.set_all({"B7": formula, "C1": "=B7*2"})
+                self.assert_error("B7", shown)
+                self.assertIn(f"B7: Calc cannot read the formula ({shown}): ", self.why("B7"))
+                self.assertIn(cause, self.why("B7"))
+                self.assertIn("Units are not typed into formulas", self.why("B7"))
+                self.assertTrue(self.why("C1").startswith("C1 passes on the error of B7: Calc cannot"))
+        self.document.set("B8", "=100+*3")
+        self.assertIn("waits for a value", self.why("B8"))
+
+    def test_a_circle_is_named_with_its_way_and_its_cure(self):
+        self.document.set_all(
+            {
+                "A1": "=A1+1",
+                "B1": "=B2+1",
+                "B2": "=B1+1",
+                "B3": "=B2*2",
+                "B4": "=EFFICIENCY_CHAIN(B1:B2)",
+                # IFERROR takes Calc's error away: some of these cells show a value.
+                "C1": "=STEAM(10;25;3)",
+                "C2": "=IFERROR(SPLIT_OUT(C4;0.5);STEAM(10;80;5))",
+                "C3": "=MIX_OUT(C1:C2)",
+                "C4": "=SET_FLOW(C3;5)",
+            }
+        )
+        for cell, expected in {
+            "A1": "A1: the formula refers to itself, a circle, ",
+            "B1": "B1: the formula refers to itself through B2, a circle, ",
+            "B3": "B3 passes on the error of B2: the formula refers to itself through B1, a circle, ",
+            "B4": "B4 passes on the error of B1: the formula refers to itself through B2, a circle, ",
+            "C2": "C2: the cell shows a value that may be a start value: the formula refers to itself "
+            "through C4 and C3, a circle, ",
+        }.items():
+            with self.subTest(cell):
+                answer = self.why(cell)
+                self.assertTrue(answer.startswith(expected), answer)
+                self.assertIn("iterations are off (Err:522)", answer)
+                self.assertIn("Calculate > Iterations, with 1000 steps", answer)
+                self.assertIn("=IFERROR(STEAM(10; ROUND(", answer)
+        for cell in ("C3", "C4"):
+            self.assertIn("the formula refers to itself through C", self.why(cell))
+        self.document.model.IsIterationEnabled = True
+        self.document.recalculate()
+        self.assertTrue(self.why("C4").startswith("C4: SET_FLOW works."))
+        self.assert_error("B1", "Err:523")
+        self.assertIn("through B2, and Calc's iterations do not settle (Err:523)", self.why("B1"))
+
+    def test_a_long_circle_names_some_of_its_cells(self):
+        self.document.set_all({"A1": "=A300", "A2": "=A1"})
+        self.document.fill_down("A2:A300")
+        answer = self.why("A1")
+        self.assertIn("A1: the formula refers to itself through A300, A299, A298 and 296 other", answer)
+
     def test_deleted_reference(self):
         self.document.set_all({"A1": 100, "D1": "=STEAM(A1;540)"})
         self.document.sheet().Columns.removeByIndex(0, 1)
