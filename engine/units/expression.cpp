@@ -3,6 +3,7 @@
 #include <cmath>
 
 #include "core/text.hpp"
+#include "units/hints.hpp"
 #include "units/symbols.hpp"
 
 namespace busbar::units {
@@ -12,13 +13,16 @@ constexpr std::size_t kLongest = 64;
 constexpr int kDeepest = 4;
 constexpr int kLargestExponent = 6;
 
+constexpr Dimension kMassPerArea{1, -2, 0, 0, 0, 0};
+constexpr Dimension kPressure{1, -1, -2, 0, 0, 0};
+
 struct Exponent {
   std::string_view text;
   int value;
 };
 // Superscripts, longest first where one begins with another.
 constexpr std::array kSuperscripts{Exponent{"⁻¹", -1}, Exponent{"⁻²", -2}, Exponent{"⁻³", -3},
-                                   Exponent{"²", 2},   Exponent{"³", 3}};
+                                   Exponent{"²", 2}, Exponent{"³", 3}};
 
 // Recursive descent over: quotient = product ["/" product]; product = factor {separator factor};
 // factor = ("(" quotient ")" | symbol) [exponent].
@@ -28,6 +32,7 @@ class Reader {
 
   bool whole(Expression& unit) { return quotient(unit, 0) && left_.empty(); }
   [[nodiscard]] double place() const { return static_cast<double>(size_ - left_.size() + 1); }
+  [[nodiscard]] std::string_view rest() const { return left_; }
   [[nodiscard]] bool two_slashes() const { return two_slashes_; }
 
  private:
@@ -148,7 +153,8 @@ class Reader {
     for (int i = 0; i < std::abs(power); ++i) {
       unit.factor = power > 0 ? unit.factor * other.factor : unit.factor / other.factor;
     }
-    // In "kJ/(kg °C)" the degree is a difference, which the trade writes so; the zero point drops out.
+    // In "kJ/(kg °C)" the degree is a difference, which the trade writes so; the zero point drops
+    // out.
     unit.offset = 0;
     return unit.reference != Reference::gauge && other.reference != Reference::gauge;
   }
@@ -164,13 +170,19 @@ Outcome<Expression> read_at(std::string_view text, std::uint8_t argument) {
   return unit;
 }
 
-Outcome<double> between(double value, std::string_view from, std::string_view to,
-                        bool difference) {
+Outcome<double> between(double value, std::string_view from, std::string_view to, bool difference) {
   const Outcome<Expression> source = read_at(from, 2);
   if (!source) return source.failure();
   const Outcome<Expression> target = read_at(to, 3);
   if (!target) return target.failure();
   if (source->dimension != target->dimension) {
+    const bool from_area = source->dimension == kMassPerArea && target->dimension == kPressure;
+    const bool to_area = source->dimension == kPressure && target->dimension == kMassPerArea;
+    if (from_area || to_area) {
+      return Failure{Fault::wrong_kind, static_cast<std::uint8_t>(from_area ? 2 : 3),
+                     "is a mass per area and no pressure; write kgf for the force, as in "
+                     "\"kgf/cm2\""};
+    }
     return Failure{Fault::wrong_kind, 3, "measures something else than the unit that is converted"};
   }
   if (!difference && source->reference != target->reference) {
@@ -198,19 +210,18 @@ Outcome<Expression> read_unit(std::string_view text) {
   if (inner.size() > kLongest) return Failure{Fault::too_large, 1, "is too long for a unit"};
   if (inner == "bar g" || inner == "bar(g)") return read_unit("barg");
   if (inner == "bar a" || inner == "bar(a)") return read_unit("bara");
-  if (inner == "psi") {
-    return Failure{Fault::unknown_word, 1,
-                   "does not say from where it is measured; write \"psia\" or \"psig\""};
-  }
   Expression unit;
   Reader reader(inner);
   if (reader.whole(unit)) return unit;
   if (reader.two_slashes()) {
     return Failure{Fault::unknown_word, 1, "has two slashes; write a/(b c)"};
   }
+  const char* hint = hint_for(reader.rest());
   return Failure{Fault::unknown_word,
                  1,
-                 "is not a unit that Busbar knows; it cannot be read from character {0} on",
+                 hint != nullptr
+                     ? hint
+                     : "is not a unit that Busbar knows; it cannot be read from character {0} on",
                  {{{reader.place(), Quantity::number}}}};
 }
 

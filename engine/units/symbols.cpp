@@ -1,6 +1,7 @@
 #include "units/symbols.hpp"
 
 #include <array>
+#include <string>
 
 namespace busbar::units {
 namespace {
@@ -49,8 +50,8 @@ constexpr Symbol gauge(std::string_view name, double factor) {
   return {name, {kPressure, factor, 0, Reference::gauge}, false};
 }
 
-// Conventional millimetre of water and of mercury, inch of mercury at 0 °C and at 32 °F: NIST SP 811,
-// appendix B.8. The US ton of 2000 lb and the ton of refrigeration are left out: "ton" means
+// Conventional millimetre of water and of mercury, inch of mercury at 0 °C and at 32 °F: NIST SP
+// 811, appendix B.8. The US ton of 2000 lb and the ton of refrigeration are left out: "ton" means
 // different masses to different readers, "t" does not.
 constexpr std::array kSymbols{
     plain("1", kNone, 1),
@@ -93,7 +94,7 @@ constexpr std::array kSymbols{
     plain("degR", kTemperature, kRankine),
     // Force and pressure
     prefixed("N", kForce, 1),
-    plain("lbf", kForce, kPound * kFall),
+    plain("lbf", kForce, kPound* kFall),
     plain("kgf", kForce, kFall),
     prefixed("Pa", kPressure, 1),
     prefixed("bar", kPressure, 1e5),
@@ -133,9 +134,9 @@ struct Prefix {
   double factor;
 };
 constexpr std::array kPrefixes{
-    Prefix{"k", 1e3},  Prefix{"M", 1e6},   Prefix{"G", 1e9},   Prefix{"T", 1e12}, Prefix{"h", 1e2},
-    Prefix{"c", 1e-2}, Prefix{"m", 1e-3},  Prefix{"µ", 1e-6},  Prefix{"μ", 1e-6}, Prefix{"u", 1e-6},
-    Prefix{"n", 1e-9}, Prefix{"d", 1e-1},
+    Prefix{"k", 1e3},  Prefix{"M", 1e6},  Prefix{"G", 1e9},  Prefix{"T", 1e12},
+    Prefix{"h", 1e2},  Prefix{"c", 1e-2}, Prefix{"m", 1e-3}, Prefix{"µ", 1e-6},
+    Prefix{"μ", 1e-6}, Prefix{"u", 1e-6}, Prefix{"n", 1e-9}, Prefix{"d", 1e-1},
 };
 
 }  // namespace
@@ -154,6 +155,15 @@ Lookup find_symbol(std::string_view name) {
     }
   }
   return {};
+}
+
+void for_each_symbol(const std::function<void(std::string_view)>& take) {
+  for (const Symbol& symbol : kSymbols) take(symbol.name);
+  for (const Prefix& prefix : kPrefixes) {
+    for (const Symbol& symbol : kSymbols) {
+      if (symbol.takes_prefix) take(std::string(prefix.name).append(symbol.name));
+    }
+  }
 }
 
 }  // namespace busbar::units

@@ -1,6 +1,7 @@
 // The unit symbols that the engine knows.
 #pragma once
 
+#include <functional>
 #include <string_view>
 
 #include "units/expression.hpp"
@@ -19,5 +20,8 @@ struct Lookup {
   Expression unit;
 };
 Lookup find_symbol(std::string_view name);
+
+/// Calls `take(name)` for every symbol, alone and with each prefix that it takes.
+void for_each_symbol(const std::function<void(std::string_view)>& take);
 
 }  // namespace busbar::units

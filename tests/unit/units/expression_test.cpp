@@ -7,7 +7,9 @@
 #include <string>
 #include <vector>
 
+#include "catalogue/sentence.hpp"
 #include "random.hpp"
+#include "units/symbols.hpp"
 
 namespace busbar::units {
 namespace {
@@ -86,6 +88,64 @@ TEST(UnitExpression, NonsenseIsRefusedWithAPlace) {
     EXPECT_EQ(read.failure().argument, 1) << text;
     EXPECT_STRNE(read.failure().reason, "") << text;
   }
+}
+
+// The sentence that a cell gives, without the name of its function.
+std::string told(const std::string& text) {
+  const Outcome<Expression> read = read_unit(text);
+  EXPECT_FALSE(read) << text;
+  return sentence({read.failure(), nullptr, UnitSet::metric, {}});
+}
+
+TEST(UnitExpression, ARefusedUnitIsToldWhatToWrite) {
+  for (const auto& [text, advice] : {
+           std::pair{"C", "write \"°C\""},
+           std::pair{"deg C", "write \"°C\""},
+           std::pair{"° C", "write \"°C\""},
+           std::pair{"℃", "write \"°C\""},
+           std::pair{"kJ/(kg C)", "write \"°C\""},
+           std::pair{"F", "write \"°F\""},
+           std::pair{"degc", "from character 1 on write \"degC\""},
+           std::pair{"kpa", "from character 1 on write \"kPa\""},
+           std::pair{"BTU/LB", "from character 5 on write \"lb\""},
+           std::pair{"KJ/KG", "from character 1 on write \"kJ\""},
+           std::pair{"kJ/KG", "from character 4 on write \"kg\""},
+           std::pair{"MPA", "write \"MPa\" or \"mPa\""},
+           std::pair{"Mw", "write \"MW\" or \"mW\""},
+           std::pair{"M3/h", "write \"m\""},
+           std::pair{"INH2O", "write \"inH2O\""},
+           std::pair{"psi", "write \"psia\" or \"psig\""},
+           std::pair{"PSI", "write \"psia\" or \"psig\""},
+           std::pair{"PSIA", "write \"psia\""},
+           std::pair{"lbs/h", "write \"lb\" from character 1 on"},
+           std::pair{"kJ/kgK", "write \"(kg K)\" from character 4 on"},
+           std::pair{"Nm3/h", "at a reference state"},
+           std::pair{"Nm", "write \"N m\""},
+           std::pair{"ton/h", "different masses"},
+       }) {
+    EXPECT_NE(told(text).find(advice), std::string::npos) << text << ": " << told(text);
+  }
+  for (const char* text : {"furlong", "Cat", "Foo", "xC", "tonight", "psix"}) {
+    EXPECT_NE(told(text).find("cannot be read from character 1 on"), std::string::npos) << text;
+  }
+}
+
+// Every way to write the letters of a symbol is either that symbol, another one, or told apart.
+TEST(UnitExpression, CapitalsAloneAlwaysGetAHint) {
+  for_each_symbol([](std::string_view name) {
+    for (const bool upper : {false, true}) {
+      std::string text(name);
+      for (char& c : text) {
+        const bool small = c >= 'a' && c <= 'z';
+        const bool capital = c >= 'A' && c <= 'Z';
+        if (upper && small) c = static_cast<char>(c - 'a' + 'A');
+        if (!upper && capital) c = static_cast<char>(c - 'A' + 'a');
+      }
+      if (read_unit(text)) continue;
+      const std::string reason = told(text);
+      EXPECT_NE(reason.find("write \""), std::string::npos) << text << ": " << reason;
+    }
+  });
 }
 
 TEST(UnitExpression, DepthLengthAndPowersAreCapped) {
@@ -167,6 +227,14 @@ TEST(Conversion, DimensionsMustAgree) {
     EXPECT_EQ(convert(1, from, to).failure().argument, 3) << from;
     EXPECT_EQ(convert_difference(1, from, to).failure().argument, 3) << from;
   }
+  // kg/cm2 is a pressure in the mouths of people, and a mass per area in the SI.
+  EXPECT_EQ(convert(1, "kg/cm2", "bar").failure().argument, 2);
+  EXPECT_EQ(convert(1, "bar", "kg/cm2").failure().argument, 3);
+  for (const Outcome<double>& refused :
+       {convert(1, "kg/cm2", "bar"), convert_difference(1, "bar", "kg/cm²")}) {
+    EXPECT_NE(std::string(refused.failure().reason).find("kgf/cm2"), std::string::npos);
+  }
+  EXPECT_TRUE(convert(1, "kg/cm2", "kg/m2"));
   EXPECT_EQ(convert(1, "nonsense", "m").failure().argument, 2);
   EXPECT_EQ(convert(1, "m", "nonsense").failure().argument, 3);
 }
