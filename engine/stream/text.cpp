@@ -65,6 +65,28 @@ void append_body(std::string& out, const Stream& stream, UnitSet set) {
 
 Failure damaged(const char* reason) { return {Fault::damaged_text, 1, reason}; }
 
+// Without what a cell gains at its ends when somebody pastes or types: spaces, tabs, line ends and
+// the no-break space (two bytes).
+std::string_view without_blanks(std::string_view text) {
+  static constexpr std::string_view kNoBreak = "\u00a0";
+  const auto blank = [](char c) { return c == ' ' || c == '\t' || c == '\r' || c == '\n'; };
+  while (!text.empty()) {
+    if (blank(text.front())) {
+      text.remove_prefix(1);
+    } else if (text.substr(0, kNoBreak.size()) == kNoBreak) {
+      text.remove_prefix(kNoBreak.size());
+    } else if (blank(text.back())) {
+      text.remove_suffix(1);
+    } else if (text.size() >= kNoBreak.size() &&
+               text.substr(text.size() - kNoBreak.size()) == kNoBreak) {
+      text.remove_suffix(kNoBreak.size());
+    } else {
+      break;
+    }
+  }
+  return text;
+}
+
 // Takes " name=" and a number off the front of the tail.
 bool take_field(std::string_view& tail, std::string_view name, double& value) {
   if (tail.substr(0, name.size()) != name) return false;
@@ -248,6 +270,11 @@ Outcome<Stream> read_stream(std::string_view text) {
   const auto bracket = text.find(" [");
   if (bracket == std::string_view::npos) {
     return Failure{Fault::wrong_kind, 1, "is a text, but not the text of a stream"};
+  }
+  if (const std::string_view inner = without_blanks(text);
+      inner.size() != text.size() && read_stream(inner)) {
+    return damaged(
+        "is the text of a stream with a space or a line end before or after it; take that away");
   }
   if (text.back() != ']') {
     return damaged("is cut or damaged: the closing bracket of its exact part is missing");

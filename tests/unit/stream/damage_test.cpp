@@ -134,6 +134,21 @@ TEST(EditedStream, InEveryUnitSet) {
   }
 }
 
+TEST(EditedStream, ABlankAtItsEndsIsTold) {
+  const std::string steam = sample::text_of(live_steam());
+  for (const std::string& text : {steam + " ", " " + steam, "\n" + steam, steam + "\r\n",
+                                  "\u00a0" + steam, steam + "\u00a0 ", "\t" + steam + "\t"}) {
+    EXPECT_NE(why(text).find("a space or a line end before or after it"), std::string::npos)
+        << why(text);
+  }
+  // Not where something else is wrong as well.
+  EXPECT_EQ(why(edited(steam, "540 °C", "450 °C") + " ").find("before or after"),
+            std::string::npos);
+  EXPECT_EQ(why(steam.substr(0, steam.size() - 1) + " ").find("before or after"),
+            std::string::npos);
+  EXPECT_FALSE(read_stream(std::string(kStreamTextLimit, ' ')));
+}
+
 TEST(EditedStream, AnotherFluidOrTagIsRefused) {
   const std::string steam = sample::text_of(live_steam());
   EXPECT_NE(why(edited(steam, "steam", "water")), "taken");
