@@ -1,6 +1,7 @@
 #include "catalogue/options.hpp"
 
 #include "core/text.hpp"
+#include "stream/text.hpp"
 
 namespace busbar {
 
@@ -12,6 +13,13 @@ Outcome<Options> read_options(std::string_view text, std::string& word) {
     const auto separator = left.find_first_of(",;");
     const std::string_view part = trimmed(left.substr(0, separator));
     const auto set = unit_set_named(part);
+    if (!set && read_stream(text)) {
+      word = quotable(part);
+      return Failure{
+          Fault::unknown_word, 1,
+          "is a stream in the place of the unit set; a function of several streams takes "
+          "one range of them, not a list"};
+    }
     if (!set) {
       word = quotable(part);
       return Failure{Fault::unknown_word, 1,

@@ -483,6 +483,21 @@ class Mistakes(SheetCase):
         self.assert_told("=PUMP_OUT(STEAM(100;540);120;0.8)", "Err:502", "inlet", "steam")
         self.assert_told("=STEAM(540;100000)", "Err:502", "temperature 100000 °C")
 
+    def test_a_space_beside_a_stream(self):
+        self.document.set("A1", "=STEAM(100;540)")
+        for ends in ('A1&" "', '" "&A1', "A1&CHAR(10)"):
+            self.assert_told(
+                f"=ENTHALPY_OF({ends})", "#VALUE!", "a space or a line end before or after it"
+            )
+
+    def test_a_list_of_streams_instead_of_a_range(self):
+        self.document.set_all({"A1": "=STEAM(100;540;5)", "A2": "=STEAM(10;300;3)"})
+        self.assert_told(
+            "=STREAM_TABLE(A1;A2)", "#VALUE!", 'options "steam 3 kg/s" is a stream', "one range"
+        )
+        self.assert_told("=STREAM_TABLE(A1;A2;A1)", "Err:504", "takes one range")
+        self.assert_told("=MIX_OUT(A1;A2)", "Err:504", "takes one range")
+
     def test_flows_forgotten(self):
         self.assert_told(
             "=FLUID_POWER(STEAM(100;540);STEAM(10;300))",
@@ -498,6 +513,16 @@ class Mistakes(SheetCase):
     def test_units_misspelt(self):
         self.assert_told('=CONVERT_UNIT(100;"bar";"kW")', "#VALUE!", 'to "kW"')
         self.assert_told('=CONVERT_UNIT(100;"brr";"psi")', "#VALUE!", 'from "brr"')
+        for unit, advice in {
+            "C": '"°C"',
+            "F": '"°F"',
+            "kpa": '"kPa"',
+            "BTU/LB": '"lb"',
+            "kg/cm2": '"kgf/cm2"',
+            "psi": '"psia" or "psig"',
+        }.items():
+            told = f'CONVERT_UNIT: from "{unit}" '
+            self.assert_told(f'=CONVERT_UNIT(1;"{unit}";"bar")', "#VALUE!", told, "write", advice)
         self.assert_told('=PUBLISHED_SOURCE("STEEM")', "#VALUE!", "STEEM")
         self.assert_told('=WHY_CALL("STEEM";1)', "#VALUE!", "STEEM")
 

@@ -35,6 +35,14 @@ TEST(Options, RefuseUnknownAndSecondWords) {
   }
 }
 
+TEST(Options, AStreamInTheirPlaceIsToldApart) {
+  const std::string told =
+      support::evaluate("WHY_CALL(\"STREAM_TABLE\"; STEAM(10; 300; 5); STEAM(10; 200; 3))")
+          .text_at();
+  EXPECT_NE(told.find("options \"steam 3 kg/s\" is a stream"), std::string::npos) << told;
+  EXPECT_NE(told.find("takes one range of them"), std::string::npos) << told;
+}
+
 TEST(Options, SurviveAnything) {
   support::Random random(31);
   for (int i = 0; i < 20000; ++i) {
