@@ -12,4 +12,3 @@ inline constexpr std::string_view kCautions =
     "and licensed practice govern.";
 
 }  // namespace busbar::addin
-

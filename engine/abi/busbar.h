@@ -1,7 +1,8 @@
 /* Busbar's C interface: the one header that a program outside the engine includes.
  *
- * A value is a grid of cells; a single cell is a grid of 1 x 1. A cell is blank or holds a number, a
- * text (UTF-8), a logical or an error. Values are opaque; whoever creates or receives one frees it.
+ * A value is a grid of cells; a single cell is a grid of 1 x 1. A cell is blank or holds a number,
+ * a text (UTF-8), a logical or an error. Values are opaque; whoever creates or receives one frees
+ * it.
  *
  * Every function may be called on any thread at any time; a value that is being changed must not be
  * used by two threads at once. Nothing here throws, prints, or touches a file or the network.
@@ -45,9 +46,9 @@ typedef struct busbar_function busbar_function;
 
 /* Kinds of error, each with the error that Calc shows for it. */
 #define BUSBAR_ERROR_NONE 0
-#define BUSBAR_ERROR_MISSING 1     /* #N/A: a value is missing */
-#define BUSBAR_ERROR_VALUE 2       /* #VALUE!: wrong kind, unknown word, wrong shape, damaged text */
-#define BUSBAR_ERROR_RANGE 3       /* Err:502: outside the published range, or impossible */
+#define BUSBAR_ERROR_MISSING 1 /* #N/A: a value is missing */
+#define BUSBAR_ERROR_VALUE 2   /* #VALUE!: wrong kind, unknown word, wrong shape, damaged text */
+#define BUSBAR_ERROR_RANGE 3   /* Err:502: outside the published range, or impossible */
 #define BUSBAR_ERROR_CONVERGENCE 4 /* Err:523: an iteration reached its cap */
 #define BUSBAR_ERROR_INTERNAL 5    /* #VALUE!: a defect of the engine; please report it */
 
@@ -98,8 +99,8 @@ BUSBAR_API size_t busbar_columns(const busbar_value* value);
 BUSBAR_API int32_t busbar_kind(const busbar_value* value, size_t row, size_t column);
 
 /* The content of one cell: 0, NULL or BUSBAR_ERROR_NONE when it holds something else. A text lives
- * until the value is changed or freed, ends in a zero, and may hold further zeros before; its length
- * goes to *length where length is not NULL. */
+ * until the value is changed or freed, ends in a zero, and may hold further zeros before; its
+ * length goes to *length where length is not NULL. */
 BUSBAR_API double busbar_get_number(const busbar_value* value, size_t row, size_t column);
 BUSBAR_API const char* busbar_get_text(const busbar_value* value, size_t row, size_t column,
                                        size_t* length);
@@ -107,20 +108,20 @@ BUSBAR_API int32_t busbar_get_logical(const busbar_value* value, size_t row, siz
 BUSBAR_API int32_t busbar_get_error(const busbar_value* value, size_t row, size_t column);
 
 /* The reason for the error in one cell, in words and in the units of the call. Writes at most
- * `capacity` bytes including the ending zero, cut at a character boundary, and returns the number of
- * bytes of the whole sentence without the zero; 0 when the cell holds no error. */
+ * `capacity` bytes including the ending zero, cut at a character boundary, and returns the number
+ * of bytes of the whole sentence without the zero; 0 when the cell holds no error. */
 BUSBAR_API size_t busbar_get_reason(const busbar_value* value, size_t row, size_t column,
                                     char* buffer, size_t capacity);
 
 /* --- Calls ------------------------------------------------------------------------------------ */
 
-/* The function of that name, capitals or not; NULL when there is none. Functions live as long as the
- * library. */
+/* The function of that name, capitals or not; NULL when there is none. Functions live as long as
+ * the library. */
 BUSBAR_API const busbar_function* busbar_find(const char* name, size_t length);
 
 /* Calls a function. arguments[i] may be NULL for an argument that is left out. What fails inside is
- * an error cell in *result; a status other than BUSBAR_OK (and *result NULL) means that there was no
- * call at all. */
+ * an error cell in *result; a status other than BUSBAR_OK (and *result NULL) means that there was
+ * no call at all. */
 BUSBAR_API int32_t busbar_call(const busbar_function* function,
                                const busbar_value* const* arguments, size_t count,
                                busbar_value** result);

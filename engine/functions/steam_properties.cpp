@@ -101,10 +101,11 @@ constexpr Row kRows[] = {
               "Negative in cold water below the temperature of its greatest density.",
               "Thermal expansion coefficient", kDerivatives,
               {"STEAM_ISOBARIC_EXPANSION(200; 346.85)", "0.00621449913"})),
-    number<Compressibility, water::isothermal_compressibility>(words(
-        "STEAM_ISOTHERMAL_COMPRESSIBILITY",
-        "Isothermal compressibility -(1/v)(dv/dp) at a pressure and a temperature", kLineNote,
-        "Compressibility", kDerivatives, {"STEAM_ISOTHERMAL_COMPRESSIBILITY(200; 346.85)", "0.000849501342"})),
+    number<Compressibility, water::isothermal_compressibility>(
+        words("STEAM_ISOTHERMAL_COMPRESSIBILITY",
+              "Isothermal compressibility -(1/v)(dv/dp) at a pressure and a temperature", kLineNote,
+              "Compressibility", kDerivatives,
+              {"STEAM_ISOTHERMAL_COMPRESSIBILITY(200; 346.85)", "0.000849501342"})),
     number<TemperatureDifference, water::superheat>(
         words("STEAM_SUPERHEAT", "Degree of superheat at a pressure and a temperature",
               "#N/A for subcooled water, and where the pressure has no saturation temperature. A "

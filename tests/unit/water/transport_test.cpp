@@ -143,8 +143,8 @@ TEST(Transport, PrintedMeltingAndSublimationPressures) {
 }
 
 TEST(Transport, MeltingLinesMeetAndInvert) {
-  // Triple points of R14-08(2011), table 1: the printed pressures, to half a unit of their own and of
-  // the printed temperatures.
+  // Triple points of R14-08(2011), table 1: the printed pressures, to half a unit of their own and
+  // of the printed temperatures.
   const auto expect_meets = [](Ice ice, double t, double printed, double half_unit) {
     const double slope = std::abs(*melting_pressure(t, ice) -
                                   *melting_pressure(ice == Ice::ih ? t + 1e-3 : t - 1e-3, ice)) /
