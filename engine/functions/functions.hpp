@@ -20,6 +20,7 @@ std::span<const Row> explanation();
 std::span<const Row> steam_properties();
 std::span<const Row> steam_transport();
 std::span<const Row> steam_pairs();
+std::span<const Row> stream_properties();
 
 /// All rows in the order of the chapters above.
 std::span<const Row* const> all();
