@@ -17,8 +17,8 @@ Outcome<Options> read_options(std::string_view text, std::string& word) {
       word = quotable(part);
       return Failure{
           Fault::unknown_word, 1,
-          "is a stream in the place of the unit set; a function of several streams takes "
-          "one range of them, not a list"};
+          "is a stream in the place of the unit set; write \"metric\", \"us\" or \"si\" there, and "
+          "give several streams as one range"};
     }
     if (!set) {
       word = quotable(part);

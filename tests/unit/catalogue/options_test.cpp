@@ -40,7 +40,7 @@ TEST(Options, AStreamInTheirPlaceIsToldApart) {
       support::evaluate("WHY_CALL(\"STREAM_TABLE\"; STEAM(10; 300; 5); STEAM(10; 200; 3))")
           .text_at();
   EXPECT_NE(told.find("options \"steam 3 kg/s\" is a stream"), std::string::npos) << told;
-  EXPECT_NE(told.find("takes one range of them"), std::string::npos) << told;
+  EXPECT_NE(told.find("several streams as one range"), std::string::npos) << told;
 }
 
 TEST(Options, SurviveAnything) {
