@@ -26,9 +26,9 @@ using com::sun::star::uno::XComponentContext;
 using com::sun::star::uno::XInterface;
 using rtl::OUString;
 
-constexpr int kMostHops = 64;                  // cells that an error is followed through
-constexpr std::size_t kCircleOfWorking = 256;  // cells behind a working one, searched for a circle
-constexpr std::size_t kLongestFormula = 160;   // of a formula that is quoted
+constexpr int kMostHops = 64;                 // cells that an error is followed through
+constexpr std::size_t kCircleOfWorking = 64;  // cells behind a working one, searched for a circle
+constexpr std::size_t kLongestFormula = 160;  // of a formula that is quoted
 constexpr std::size_t kLongestAnswer = 4000;
 
 // Cut at a character, with a sign that it was.
