@@ -1,5 +1,8 @@
-// The HTML help: an index by chapter and one page a function.
+// The HTML help: an index by chapter, one page a function, and the pages written by hand.
 #include <busbar.h>
+
+#include <stdexcept>
+#include <string_view>
 
 #include "../cautions.hpp"
 #include "escape.hpp"
@@ -12,23 +15,32 @@ constexpr const char* kStyle =
     R"(:root { --ink: #22262b; --faint: #646c76; --rule: #d8dce1; --bar: #8a4b14; --wash: #f6f3ee; }
 body { margin: 0; color: var(--ink); background: #fff; font: 16px/1.55 "Source Serif 4", Charter, "DejaVu Serif", Georgia, serif; }
 header { border-top: 6px solid var(--bar); background: var(--wash); padding: 1.1em 0 0.9em; }
-header, main, footer { padding-left: max(1.2em, calc(50vw - 25em)); padding-right: max(1.2em, calc(50vw - 25em)); }
+header, main, footer { padding-left: max(1.2rem, calc(50vw - 25rem)); padding-right: max(1.2rem, calc(50vw - 25rem)); }
 h1 { font-size: 1.7em; margin: 0.2em 0; letter-spacing: 0.01em; overflow-wrap: anywhere; }
 h2 { font-size: 1.1em; margin: 1.9em 0 0.4em; color: var(--bar); }
 a { color: #20507c; }
 code, pre { font-family: "DejaVu Sans Mono", "Liberation Mono", monospace; font-size: 0.88em; }
-pre { background: var(--wash); border-left: 3px solid var(--bar); padding: 0.6em 0.9em; white-space: pre-wrap; overflow-wrap: anywhere; }
+pre { font-size: 0.8em; background: var(--wash); border-left: 3px solid var(--bar); padding: 0.6em 0.9em; white-space: pre-wrap; overflow-wrap: anywhere; }
 table { border-collapse: collapse; width: 100%; font-size: 0.93em; }
-th, td { text-align: left; vertical-align: top; padding: 0.4em 0.8em 0.4em 0; border-bottom: 1px solid var(--rule); }
-th { font-weight: 600; color: var(--faint); }
-dl { display: grid; grid-template-columns: minmax(12em, auto) 1fr; gap: 0.25em 1em; }
+th, td { text-align: left; vertical-align: top; padding: 0.4em 1.1em 0.4em 0; border-bottom: 1px solid var(--rule); }
+th { font-weight: 600; color: var(--faint); white-space: nowrap; }
+.arguments td:nth-child(4) { min-width: 18em; }
+.errors td:first-child { white-space: nowrap; }
+dl { display: grid; grid-template-columns: 19em 1fr; gap: 0.25em 1em; }
 dt { font-weight: 600; } dd { margin: 0; }
+.contents { columns: 3 12em; padding-left: 1.2em; margin: 1em 0; }
 .trail { font-size: 0.9em; color: var(--faint); }
 footer { margin-top: 3em; padding-top: 1em; padding-bottom: 2em; border-top: 1px solid var(--rule); font-size: 0.9em; color: var(--faint); }
+@media (max-width: 45rem) {
+  table { display: block; overflow-x: auto; }
+  .arguments td:nth-child(4) { min-width: 10em; }
+  .errors td:first-child { white-space: normal; }
+  dl { display: block; } dd { margin-bottom: 0.6em; }
+}
 )";
 
 constexpr const char* kErrors =
-    "<table><tr><th>In the cell</th><th>What happened</th></tr>\n"
+    "<table class=\"errors\"><tr><th>In the cell</th><th>What happened</th></tr>\n"
     "<tr><td>#N/A</td><td>a value is missing: an empty text, or a blank cell inside a "
     "range</td></tr>\n"
     "<tr><td>#VALUE!</td><td>wrong kind of value, unknown word, ranges that do not fit each other, "
@@ -80,7 +92,8 @@ std::string ranges(const Argument& argument) {
 std::string argument_table(const Function& function) {
   if (function.arguments.empty()) return "<p>This function takes no arguments.</p>\n";
   std::string out =
-      "<table><tr><th>Argument</th><th>Meaning</th><th>Takes</th><th>Unit and range</th></tr>\n";
+      "<table class=\"arguments\"><tr><th>Argument</th><th>Meaning</th><th>Takes</th><th>Unit and "
+      "range</th></tr>\n";
   for (const Argument& argument : function.arguments) {
     out += "<tr><td>" + markup_text(argument.name) + (argument.optional ? "<br>(optional)" : "") +
            "</td><td>" + markup_text(argument.meaning) + "</td><td>" + kind_in_words(argument) +
@@ -107,7 +120,8 @@ std::string function_page(const Catalogue& catalogue, const Function& function) 
   }
   out +=
       "<h2>Errors</h2>\n<p>When a cell shows an error, <code>=WHY(cell)</code> says in a sentence "
-      "what failed in it.</p>\n";
+      "what failed in it. More on errors, blanks, ranges and circles: <a "
+      "href=\"../working-in-a-sheet.html\">Working in a sheet</a>.</p>\n";
   out += kErrors;
   if (!function.since.empty())
     out += "<p class=\"trail\">Since version " + markup_text(function.since) + ".</p>\n";
@@ -118,7 +132,35 @@ std::string function_page(const Catalogue& catalogue, const Function& function) 
               catalogue.version, out);
 }
 
-std::string index_page(const Catalogue& catalogue) {
+// The title in the comment that a page written by hand begins with.
+std::string title_of(const HelpPage& written) {
+  constexpr std::string_view kBegin = "<!-- ";
+  constexpr std::string_view kEnd = " -->";
+  const std::size_t end = written.text.find(kEnd);
+  if (written.text.substr(0, kBegin.size()) != kBegin || end == std::string::npos)
+    throw std::runtime_error(written.file + " does not begin with its title in a comment");
+  return written.text.substr(kBegin.size(), end - kBegin.size());
+}
+
+// The text behind the comments, with the table of errors where it belongs.
+std::string content_of(const HelpPage& written) {
+  constexpr std::string_view kTable = "{{errors}}\n";
+  std::string text = written.text;
+  while (text.substr(0, 4) == "<!--") {
+    const std::size_t end = text.find("-->");
+    if (end == std::string::npos) throw std::runtime_error(written.file + ": a comment has no end");
+    text.erase(0, text.find_first_not_of(" \n", end + 3));
+  }
+  const std::size_t at = text.find(kTable);
+  return at == std::string::npos ? text : text.replace(at, kTable.size(), kErrors);
+}
+
+std::string written_page(const Catalogue& catalogue, const HelpPage& written) {
+  return page(title_of(written), "", "<a href=\"index.html\">Busbar functions</a>",
+              catalogue.version, content_of(written));
+}
+
+std::string index_page(const Catalogue& catalogue, const std::vector<HelpPage>& written) {
   std::string out =
       "<p>Each function names its published source, takes a range where it takes a value (enter it "
       "as an array formula), and answers with a number that is right or with an error that has a "
@@ -129,6 +171,12 @@ std::string index_page(const Catalogue& catalogue) {
       "\u00b0F, Btu/lb, lb/h, MW, ft\u00b3) or <code>\"si\"</code> (Pa, K, J/kg, kg/s, W, m\u00b3)."
       "</p>\n<p>Pressures are absolute. A value in another file must stand in a cell of its own "
       "before a function can take it.</p>\n";
+  for (const HelpPage& one : written)
+    out.append("<p><a href=\"")
+        .append(markup_text(one.file))
+        .append("\">")
+        .append(markup_text(title_of(one)))
+        .append("</a>: streams, units, errors, blanks, ranges, other files, circles.</p>\n");
   for (const Chapter& chapter : catalogue.chapters) {
     out += "<h2 id=\"" + markup_text(parameter_identifier(chapter.name)) + "\">" +
            markup_text(chapter.name) + "</h2>\n<dl>\n";
@@ -145,10 +193,12 @@ std::string index_page(const Catalogue& catalogue) {
 
 }  // namespace
 
-std::map<std::string, std::string> write_help(const Catalogue& catalogue) {
+std::map<std::string, std::string> write_help(const Catalogue& catalogue,
+                                              const std::vector<HelpPage>& written) {
   std::map<std::string, std::string> pages;
   pages["busbar.css"] = kStyle;
-  pages["index.html"] = index_page(catalogue);
+  pages["index.html"] = index_page(catalogue, written);
+  for (const HelpPage& one : written) pages[one.file] = written_page(catalogue, one);
   for (const Function& function : catalogue.functions)
     pages["functions/" + function.name + ".html"] = function_page(catalogue, function);
   return pages;

@@ -1,4 +1,5 @@
-// busbar-export FOLDER             writes all that registers the engine with Calc
+// busbar-export FOLDER PAGE...     writes all that registers the engine with Calc; the PAGEs of the
+//                                  help are those written by hand
 // busbar-export --reference FILE   writes the function reference alone
 //
 // Knows the engine by its C interface only. Files that would not change keep their time stamp, so
@@ -12,6 +13,7 @@
 #include <stdexcept>
 #include <string>
 #include <string_view>
+#include <vector>
 
 #include "writers.hpp"
 
@@ -26,6 +28,13 @@ bool holds(const fs::path& file, const std::string& content) {
   return present == content;
 }
 
+std::string content_of(const fs::path& file) {
+  std::ifstream in(file, std::ios::binary);
+  std::string content{std::istreambuf_iterator<char>(in), std::istreambuf_iterator<char>()};
+  if (!in) throw std::runtime_error("cannot read " + file.string());
+  return content;
+}
+
 void write(const fs::path& file, const std::string& content) {
   if (holds(file, content)) return;
   if (file.has_parent_path()) fs::create_directories(file.parent_path());
@@ -36,9 +45,10 @@ void write(const fs::path& file, const std::string& content) {
 }
 
 // Writes the pages and removes what an earlier catalogue left.
-void write_help_folder(const fs::path& folder, const busbar::exporter::Catalogue& catalogue) {
+void write_help_folder(const fs::path& folder, const busbar::exporter::Catalogue& catalogue,
+                       const std::vector<busbar::exporter::HelpPage>& written) {
   std::set<fs::path> wanted;
-  for (const auto& [name, content] : busbar::exporter::write_help(catalogue)) {
+  for (const auto& [name, content] : busbar::exporter::write_help(catalogue, written)) {
     write(folder / name, content);
     wanted.insert((folder / name).lexically_normal());
   }
@@ -47,13 +57,13 @@ void write_help_folder(const fs::path& folder, const busbar::exporter::Catalogue
       fs::remove(entry.path());
 }
 
-void export_all(const fs::path& folder) {
+void export_all(const fs::path& folder, const std::vector<busbar::exporter::HelpPage>& written) {
   const auto catalogue = busbar::exporter::read_catalogue();
   write(folder / "busbar.idl", busbar::exporter::write_idl(catalogue));
   write(folder / "CalcAddIns.xcu", busbar::exporter::write_registration(catalogue));
   write(folder / "functions.cpp", busbar::exporter::write_glue(catalogue));
   write(folder / "functions.md", busbar::exporter::write_reference(catalogue));
-  write_help_folder(folder / "help", catalogue);
+  write_help_folder(folder / "help", catalogue, written);
 }
 
 }  // namespace
@@ -64,11 +74,14 @@ int main(int argc, char** argv) {
       write(argv[2], busbar::exporter::write_reference(busbar::exporter::read_catalogue()));
       return 0;
     }
-    if (argc == 2 && argv[1][0] != '-') {
-      export_all(argv[1]);
+    if (argc >= 2 && argv[1][0] != '-') {
+      std::vector<busbar::exporter::HelpPage> written;
+      for (int i = 2; i < argc; ++i)
+        written.push_back({fs::path(argv[i]).filename().string(), content_of(argv[i])});
+      export_all(argv[1], written);
       return 0;
     }
-    std::cerr << "usage: busbar-export FOLDER | busbar-export --reference FILE\n";
+    std::cerr << "usage: busbar-export FOLDER PAGE... | busbar-export --reference FILE\n";
     return 2;
   } catch (const std::exception& e) {
     std::cerr << "busbar-export: " << e.what() << '\n';
