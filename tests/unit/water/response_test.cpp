@@ -188,8 +188,8 @@ TEST(Response, ThrottlingAndSoundAlongTheirLines) {
 }
 
 // Clapeyron: dp/dT = (s'' - s') / (v'' - v') along the saturation line, and equal Gibbs energies.
-// Equation 30 is a fit of its own: R7-97(2012), section 10, states 0.025 % for its pressure, and by
-// so much pressure times v'' - v' the Gibbs energies may differ.
+// Equation 30 is a fit of its own: R7-97(2012), figure 6 (from memory), states 0.025 % for its
+// pressure, and by so much pressure times v'' - v' the Gibbs energies may differ.
 TEST(Response, ClapeyronAlongTheSaturationLine) {
   for (double t = 274; t < 640; t += 1) {
     const double p = *saturation_pressure(t);

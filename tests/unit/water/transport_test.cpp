@@ -58,7 +58,7 @@ TEST(Transport, PrintedViscosities) {
 }
 
 // Tables 7 to 9 (industrial use) print every intermediate result. Tables 4 and 5 give the parts
-// that both uses share; lambda2 of table 5 needs IAPWS-95 (iapws95_test.cpp).
+// that both uses share; lambda2 of table 5 belongs to scientific use.
 TEST(Transport, PrintedConductivities) {
   std::map<std::string, int> seen;
   for (const Row& row : read_rows("r15-11.csv")) {
