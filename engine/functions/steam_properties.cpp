@@ -35,11 +35,6 @@ constexpr Argument kPressureTemperature[] = {kPressureArgument, kTemperatureArgu
 constexpr Argument kPressureDryness[] = {kPressureArgument, kDrynessArgument};
 constexpr Argument kPressure[] = {kPressureArgument};
 
-constexpr Source kEnergies{kIf97, kIf97Edition, "tables 3, 12, 31 and 39"};
-constexpr Source kDerivatives{
-    "IAPWS R7-97(2012) with IAPWS AN3-07(2018), Thermodynamic Derivatives from IAPWS Formulations",
-    "August 2007, revision of 2012; 2018",
-    "second derivatives of equations 7, 15, 28 and 32 (tables 3, 12, 31, 39)"};
 constexpr Source kSaturatedStates{kIf97, kIf97Edition,
                                   "equations 30 and 31, saturated states by equations 7, 15, 28"};
 

@@ -41,19 +41,6 @@ Outcome<Pressure> sublimation_pressure(Temperature t) {
 
 // --- Rows ------------------------------------------------------------------------------------
 
-constexpr Source kViscosityRelease{
-    "IAPWS R12-08, Release on the IAPWS Formulation 2008 for the Viscosity of Ordinary Water "
-    "Substance; densities by IAPWS-IF97",
-    "September 2008", "equations 10 to 12; mu2 = 1 for industrial use"};
-constexpr Source kConductivityRelease{
-    "IAPWS R15-11, Release on the IAPWS Formulation 2011 for the Thermal Conductivity of Ordinary "
-    "Water Substance; states by IAPWS-IF97",
-    "September 2011", "equations 15 to 25, formulation for industrial use"};
-constexpr Source kPrandtlReleases{"IAPWS R12-08, R15-11 and R7-97(2012)", "2008, 2011 and 2012",
-                                  "viscosity times cp over thermal conductivity"};
-constexpr Source kTensionRelease{
-    "IAPWS R1-76(2014), Revised Release on Surface Tension of Ordinary Water Substance",
-    "June 2014", "equation 1"};
 constexpr Source kIceRelease{
     "IAPWS R14-08(2011), Revised Release on the Pressure along the Melting and Sublimation Curves "
     "of Ordinary Water Substance",

@@ -123,20 +123,6 @@ constexpr Argument kExergy[] = {
     {"dead state temperature", "Temperature of the dead state, such as that of the ambient air",
      273.15, 2273.15, kIf97Limit}};
 
-constexpr Source kEnergies{kIf97, kIf97Edition, "tables 3, 12, 31 and 39"};
-constexpr Source kDerivatives{
-    "IAPWS R7-97(2012) with IAPWS AN3-07(2018), Thermodynamic Derivatives from IAPWS Formulations",
-    "August 2007, revision of 2012; 2018",
-    "second derivatives of equations 7, 15, 28 and 32 (tables 3, 12, 31, 39)"};
-constexpr Source kViscosityRelease{"IAPWS R12-08, viscosity of ordinary water substance",
-                                   "September 2008", "equations 10 to 12; mu2 = 1"};
-constexpr Source kConductivityRelease{
-    "IAPWS R15-11, thermal conductivity of ordinary water substance", "September 2011",
-    "equations 15 to 25, formulation for industrial use"};
-constexpr Source kPrandtlReleases{"IAPWS R12-08, R15-11 and R7-97(2012)", "2008, 2011 and 2012",
-                                  "viscosity times cp over thermal conductivity"};
-constexpr Source kTensionRelease{"IAPWS R1-76(2014), surface tension of ordinary water substance",
-                                 "June 2014", "equation 1"};
 constexpr Source kAll{"IAPWS R7-97(2012), AN3-07(2018), R12-08, R15-11, R1-76(2014)",
                       "2012, 2018, 2008, 2011, 2014", "each property as its own function says"};
 constexpr Source kExergySource{"Definition of flow exergy; states by IAPWS R7-97(2012)",

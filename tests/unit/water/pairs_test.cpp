@@ -146,55 +146,55 @@ TEST(Pairs, TemperatureAndEntropy) {
   }
 }
 
-// Where there is one state it comes back; where the answer is refused, another state with the same
-// enthalpy is shown.
+// How often the enthalpy passes a value as the pressure rises at a temperature.
+int crossings(double temperature, double enthalpy) {
+  const double top = temperature > kHighestTemperature2 ? kHighestPressure5 : kHighestPressure;
+  int count = 0;
+  bool above = false;
+  for (int k = 0; k <= 1200; ++k) {
+    // By the logarithm up to 1 MPa, then by the pressure.
+    const double p = k <= 300 ? 1e-3 * std::exp(k / 300.0 * std::log(1e9))
+                              : 1e6 + (k - 300) / 900.0 * (top - 1e6);
+    const auto state = at_pressure_temperature(p, temperature);
+    if (!state) break;
+    const bool now = state->enthalpy > enthalpy;
+    if (k > 0 && now != above) ++count;
+    above = now;
+  }
+  return count;
+}
+
+// Where one state has the pair it comes back, and no other pressure gives that enthalpy; where the
+// answer is refused there are several.
 TEST(Pairs, TemperatureAndEnthalpy) {
   Sampler sampler(75);
   int found = 0;
   int refused = 0;
-  for (int k = 0; k < 20000; ++k) {
+  int unseen = 0;
+  for (int k = 0; k < 3000; ++k) {
     const State state = random_state(sampler);
     const auto back = at_temperature_enthalpy(state.temperature, state.enthalpy);
+    const int count = crossings(state.temperature, state.enthalpy);
     if (back) {
       ++found;
       EXPECT_EQ(back->enthalpy, state.enthalpy);
       EXPECT_EQ(back->temperature, state.temperature);
       ASSERT_EQ(back->region, state.region) << state.pressure << " " << state.temperature;
       if (state.region != Region::two_phase) testing::expect_exact(*back);
+      // Thin vapour has its enthalpy to the last digits before the first pressure that is looked
+      // at.
+      EXPECT_LE(count, 1) << "p " << state.pressure << ", T " << state.temperature;
       continue;
     }
     ++refused;
     ASSERT_EQ(back.failure().fault, Fault::outside_range);
     EXPECT_EQ(back.failure().argument, 2);
-    // The enthalpy passes the value more than once as the pressure rises.
-    const double top =
-        state.temperature > kHighestTemperature2 ? kHighestPressure5 : kHighestPressure;
-    int crossings = 0;
-    double last = at_pressure_temperature(1e-3, state.temperature)->enthalpy - state.enthalpy;
-    const auto cross = [&](double p) {
-      const double now = at_pressure_temperature(p, state.temperature)->enthalpy - state.enthalpy;
-      if ((now < 0) != (last < 0)) ++crossings;
-      last = now;
-    };
-    for (int i = 1; i <= 400; ++i) {
-      const double p = i < 200 ? std::exp(std::log(1e-3) + i / 200.0 * std::log(1e8 / 1e-3))
-                               : top * (i - 199) / 201.0;
-      if (i == 200) {
-        last = at_pressure_temperature(1e-3, state.temperature)->enthalpy - state.enthalpy;
-        crossings = 0;
-      }
-      if (p <= top) cross(p);
-    }
-    // Two crossings closer together than the steps are seen as none or as a touching.
-    if (crossings < 2) {
-      const auto at = response_of_phase(state);
-      if (state.region == Region::two_phase) continue;
-      EXPECT_LT(std::abs(at.joule_thomson * 1e5), 0.6)
-          << crossings << " p " << state.pressure << " T " << state.temperature;
-    }
+    // Two crossings between neighbouring pressures are not seen.
+    if (count < 2) ++unseen;
   }
-  EXPECT_GT(found, 5000);
-  EXPECT_GT(refused, 1000);
+  EXPECT_GT(found, 700);
+  EXPECT_GT(refused, 150);
+  EXPECT_LT(unseen, refused / 10);
 }
 
 TEST(Pairs, TemperatureAndDryness) {
