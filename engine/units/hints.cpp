@@ -82,10 +82,9 @@ const std::map<std::string, std::string>& spellings() {
       all += '"';
     });
     for (auto& [key, all] : names) {
-      all =
-          "is not a unit that Busbar knows; capitals and small letters count: from character {0} "
-          "on write " +
-          all;
+      all.insert(0,
+                 "is not a unit that Busbar knows; capitals and small letters count: from "
+                 "character {0} on write ");
     }
     return new std::map<std::string, std::string>(std::move(names));
   }();

@@ -56,7 +56,7 @@ Inverse invert_gibbs(double pressure, double value, double start, double lowest,
   const double pi = pressure / Equation::kReducingPressure;
   double logarithm = 0;
   if constexpr (Equation::kHasLogarithm) logarithm = std::log(pi);
-  double target;
+  double target = 0;
   if constexpr (kGiven == Given::enthalpy) {
     target = value / (kGasConstant * kTemperature);
   } else {
@@ -111,8 +111,8 @@ Inverse invert_gibbs(double pressure, double value, double start, double lowest,
 
 template <Given kGiven>
 Inverse invert_region_3(double pressure, double value) {
-  double temperature;
-  double density;
+  double temperature = 0;
+  double density = 0;
   if constexpr (kGiven == Given::enthalpy) {
     // Equation 1 of SR3-03(2014) holds from pc on; its value at pc serves below.
     const double at = std::fmax(pressure, kCriticalPressure);
@@ -152,9 +152,9 @@ Inverse invert_region_3(double pressure, double value) {
     const double pressure_density = rt * (2 * f.delta1 + f.delta2);
     const double pressure_temperature = density * kGasConstant * (f.delta1 - f.mixed);
     const double enthalpy = rt * (f.tau1 + f.delta1);
-    double missing;
-    double by_density;
-    double by_temperature;
+    double missing = 0;
+    double by_density = 0;
+    double by_temperature = 0;
     double entropy = 0;
     const auto entropy_at = [&] {
       return kGasConstant * (f.tau1 - f.value - tables::kRegion3N1 * std::log(delta));
