@@ -81,16 +81,20 @@ void describe_stream(std::string& text, const Stream& stream, UnitSet units) {
 
 Failure no_dryness(const water::State& state, std::uint8_t argument) {
   const auto near = water::neighbourhood(state);
+  const bool of_stream = argument > 0;
   if (!near.has_saturation) {
     return {Fault::missing, argument,
-            "is above the critical pressure or temperature, where there is no dryness"};
+            of_stream
+                ? "is above the critical pressure or temperature, where there is no dryness"
+                : "the state is above the critical pressure or temperature, where there is no "
+                  "dryness"};
   }
   const Measure distance{std::abs(near.distance), Quantity::temperature_difference};
-  return {Fault::missing,
-          argument,
-          near.distance > 0 ? "is superheated by {0}: there is no dryness"
-                            : "is subcooled by {0}: there is no dryness",
-          {{distance}}};
+  const char* superheated = of_stream ? "is superheated by {0}: there is no dryness"
+                                      : "the state is superheated by {0}: there is no dryness";
+  const char* subcooled = of_stream ? "is subcooled by {0}: there is no dryness"
+                                    : "the state is subcooled by {0}: there is no dryness";
+  return {Fault::missing, argument, near.distance > 0 ? superheated : subcooled, {{distance}}};
 }
 
 void explain_result(const Slot*, const Result& result, UnitSet units, std::string& text) {

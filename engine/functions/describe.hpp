@@ -16,7 +16,7 @@ void describe_stream(std::string& text, const Stream& stream, UnitSet units);
 void append_validity(std::string& text, UnitSet units);
 
 /// The failure of asking a single-phase state for its dryness: #N/A, with the distance from
-/// saturation.
+/// saturation. `argument` is that of the stream, or 0 where the state came from two numbers.
 Failure no_dryness(const water::State& state, std::uint8_t argument);
 
 /// Explain hooks for rows: the stream that comes out, and the streams that go in (arguments 1, 2).

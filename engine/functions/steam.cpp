@@ -67,7 +67,7 @@ Outcome<Density> density(Pressure p, Temperature t) {
 // Outside the two-phase region there is no dryness: #N/A, with the distance from saturation.
 Outcome<Fraction> dryness_of_state(const Outcome<State>& state) {
   if (!state) return state.failure();
-  if (state->region != water::Region::two_phase) return no_dryness(*state, 2);
+  if (state->region != water::Region::two_phase) return no_dryness(*state, 0);
   return Fraction{state->dryness};
 }
 
