@@ -22,6 +22,9 @@ from iapws.iapws97 import IAPWS97, _PSat_T, _TSat_P
 # rule.
 ROUNDING = 1e-10
 
+# The same for second derivatives.
+SECOND_ORDER = 1e-9
+
 
 class Engine:
     """Calls of functions of numbers through the C interface."""
@@ -129,6 +132,24 @@ def main():
         compared.check(f"h {place}", busbar("STEAM_ENTHALPY", bar, celsius), theirs.h, ROUNDING, 1.0)
         compared.check(f"s {place}", busbar("STEAM_ENTROPY", bar, celsius), theirs.s, ROUNDING, 1e-2)
         compared.check(f"v {place}", busbar("STEAM_VOLUME", bar, celsius), theirs.v, ROUNDING, 0)
+        for name, value, floor in (
+            ("STEAM_INTERNAL_ENERGY", theirs.u, 1.0),
+            ("STEAM_HELMHOLTZ_ENERGY", theirs.a, 1.0),
+            ("STEAM_GIBBS_ENERGY", theirs.g, 1.0),
+            ("STEAM_HEAT_CAPACITY", theirs.cp, 0),
+            ("STEAM_ISOCHORIC_HEAT_CAPACITY", theirs.cv, 0),
+            ("STEAM_SPEED_OF_SOUND", theirs.w, 0),
+            # Per K; zero at the greatest density of water.
+            ("STEAM_ISOBARIC_EXPANSION", theirs.alfav, 1e-4),
+            # Per MPa and K/kPa there, per bar and K/bar here. In thin vapour the coefficient there is a
+            # small difference of large numbers.
+            ("STEAM_ISOTHERMAL_COMPRESSIBILITY", theirs.xkappa / 10, 0),
+            ("STEAM_JOULE_THOMSON_COEFFICIENT", theirs.joule * 100, 0.1),
+        ):
+            compared.check(f"{name} {place}", busbar(name, bar, celsius), value, SECOND_ORDER, floor)
+        if temperature <= 1173.15:
+            viscosity = busbar("STEAM_VISCOSITY", bar, celsius)
+            compared.check(f"STEAM_VISCOSITY {place}", viscosity, theirs.mu * 1e6, ROUNDING, 0)
 
     for _ in range(arguments.states // 5):
         temperature = rng.uniform(273.16, 647.0)

@@ -28,8 +28,9 @@ inline Response gibbs_response(double pressure, double temperature) {
   out.isentropic_exponent = stiffness / g.pi_pi1;
   out.isobaric_expansion = by_temperature / (g.pi_pi1 * temperature);
   out.isothermal_compressibility = -g.pi_pi2 / (g.pi_pi1 * pressure);
-  // v (T beta - 1) / cp with v = R T pi g_pi / p
-  out.joule_thomson = rt / pressure * (by_temperature - g.pi_pi1) / out.isobaric_heat_capacity;
+  // v (T beta - 1) / cp with v = R T pi g_pi / p, where pi g_pi - tau pi g_pitau - pi g_pi leaves
+  // the mixed derivative: no difference of nearly equal numbers in thin vapour.
+  out.joule_thomson = -rt * tau * (g.mixed / pressure) / out.isobaric_heat_capacity;
   return out;
 }
 

@@ -264,6 +264,16 @@ TEST(Response, BecomesThatOfAnIdealGas) {
   }
 }
 
+// In thin vapour the Joule-Thomson coefficient tends to (T dB/dT - B)/cp, which no longer depends
+// on the pressure.
+TEST(Response, ThrottlingOfThinVapourHasALimit) {
+  for (const double t : {280.0, 500.0, 1000.0, 1500.0, 2200.0}) {
+    const double thin = response(*at_pressure_temperature(1e-9, t))->joule_thomson;
+    const double limit = response(*at_pressure_temperature(1e-5, t))->joule_thomson;
+    EXPECT_NEAR(thin, limit, 1e-8 * std::abs(limit)) << t;
+  }
+}
+
 TEST(Saturation, DegreesOfSuperheatAndSubcooling) {
   // R7-97(2012), table 36: Ts(1 MPa) = 453.035632 K.
   EXPECT_NEAR(*superheat(*at_pressure_temperature(1e6, 473.15)), 473.15 - 453.035632, 0.5e-6);
