@@ -150,6 +150,12 @@ def main():
         if temperature <= 1173.15:
             viscosity = busbar("STEAM_VISCOSITY", bar, celsius)
             compared.check(f"STEAM_VISCOSITY {place}", viscosity, theirs.mu * 1e6, ROUNDING, 0)
+        # Region 5 has no critical enhancement in R15-11's formulation for industrial use.
+        if theirs.region != 5:
+            conductivity = busbar("STEAM_THERMAL_CONDUCTIVITY", bar, celsius)
+            compared.check(
+                f"STEAM_THERMAL_CONDUCTIVITY {place}", conductivity, theirs.k, SECOND_ORDER, 0
+            )
 
     for _ in range(arguments.states // 5):
         temperature = rng.uniform(273.16, 647.0)
