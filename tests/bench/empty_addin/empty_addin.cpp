@@ -37,7 +37,7 @@ class EmptyAddIn : public Base {
   Any SAL_CALL EMPTY_THREE(const Any& a, const Any& b, const Any& c) override {
     return Any(number_in(a) + number_in(b) + number_in(c));
   }
-  Any SAL_CALL EMPTY_TEXT(const Any& a, const Any& b, const Any& /*c*/) override {
+  Any SAL_CALL EMPTY_TEXT(const Any& a, const Any& b, const Any& /*c*/, const Any& /*d*/) override {
     OUString text;
     if (a >>= text) return Any(text);
     return Any(stream_long(number_in(a) + number_in(b)));
@@ -58,7 +58,7 @@ class EmptyAddIn : public Base {
   Any SAL_CALL EMPTY_TEXT_TABLE(const Any& a, const Any& b) override {
     Sequence<Sequence<Any>> first;
     Sequence<Sequence<Any>> second;
-    if (!(a >>= first) || !(b >>= second)) return EMPTY_TEXT(a, b, Any());
+    if (!(a >>= first) || !(b >>= second)) return EMPTY_TEXT(a, b, Any(), Any());
     const sal_Int32 rows = first.getLength();
     Sequence<Sequence<OUString>> out(rows);
     auto* row = out.getArray();
