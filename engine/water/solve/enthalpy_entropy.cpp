@@ -87,7 +87,7 @@ double start(double enthalpy, double entropy) {
   const bool vapour = enthalpy > kEnthalpyRegion5 || entropy > kVapourEntropy273;
   const double pressure = vapour && enthalpy > 2.4e6 ? ideal_start(enthalpy, entropy)
                                                      : backward::pressure_hs(enthalpy, entropy);
-  return std::isfinite(pressure) ? std::clamp(pressure, 1e-3 * kLowest + 1e-280, kHighest) : 1e6;
+  return std::isfinite(pressure) ? std::clamp(pressure, kLowest, kHighest) : 1e6;
 }
 
 Outcome<Found> answer(const Point& point, double enthalpy, double entropy, int points) {
@@ -136,7 +136,7 @@ Outcome<Found> at_enthalpy_entropy(double enthalpy, double entropy) {
 
   double low = kLowest;
   double high = kHighest;
-  double pressure = std::clamp(start(enthalpy, entropy), low, high);
+  double pressure = start(enthalpy, entropy);
   Point below;  // the point at `low`, once there is one
   bool has_below = false;
   for (int points = 1; points <= kIsentropeCap; ++points) {
