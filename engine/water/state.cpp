@@ -5,6 +5,7 @@
 #include "water/constants.hpp"
 #include "water/equations/saturation.hpp"
 #include "water/failure.hpp"
+#include "water/solve/assemble.hpp"
 #include "water/solve/density.hpp"
 #include "water/solve/isobar.hpp"
 
@@ -81,17 +82,6 @@ Outcome<State> checked(const State& state) {
                  {state.pressure, Quantity::pressure});
 }
 
-State make_state(Region region, double pressure, double temperature, const Properties& at) {
-  State state;
-  state.pressure = pressure;
-  state.temperature = temperature;
-  state.volume = at.volume;
-  state.enthalpy = at.enthalpy;
-  state.entropy = at.entropy;
-  state.region = region;
-  return state;
-}
-
 // Liquid at or above the saturation pressure. Equations 30 and 31 are inverse to each other but for
 // the last digits: a state that lies on the line by either of them is liquid.
 bool is_liquid(double pressure, double temperature) {
@@ -132,18 +122,18 @@ Outcome<State> at_pressure_temperature(double pressure, double temperature) {
   }
   if (temperature <= kTemperature13) {
     if (pressure > kPressure13 || is_liquid(pressure, temperature)) {
-      return make_state(Region::liquid, pressure, temperature, properties_1(pressure, temperature));
+      return assembled(Region::liquid, pressure, temperature, properties_1(pressure, temperature));
     }
     return checked(
-        make_state(Region::vapour, pressure, temperature, properties_2(pressure, temperature)));
+        assembled(Region::vapour, pressure, temperature, properties_2(pressure, temperature)));
   }
   if (temperature > kHighestTemperature2) {
-    return checked(make_state(Region::high_temperature, pressure, temperature,
-                              properties_5(pressure, temperature)));
+    return checked(assembled(Region::high_temperature, pressure, temperature,
+                             properties_5(pressure, temperature)));
   }
   if (!in_region_3(pressure, temperature)) {
     return checked(
-        make_state(Region::vapour, pressure, temperature, properties_2(pressure, temperature)));
+        assembled(Region::vapour, pressure, temperature, properties_2(pressure, temperature)));
   }
   const bool liquid = temperature < kCriticalTemperature && is_liquid(pressure, temperature);
   const DensityFound found = density_3(pressure, temperature, liquid);
@@ -152,8 +142,8 @@ Outcome<State> at_pressure_temperature(double pressure, double temperature) {
                         "the density of IAPWS-IF97 region 3 did not converge at {0} and {1}",
                         {pressure, Quantity::pressure}, {temperature, Quantity::temperature});
   }
-  return make_state(Region::near_critical, pressure, temperature,
-                    properties_3(found.density, temperature));
+  return assembled(Region::near_critical, pressure, temperature,
+                   properties_3(found.density, temperature));
 }
 
 Outcome<State> at_pressure_enthalpy(double pressure, double enthalpy) {

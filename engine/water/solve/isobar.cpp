@@ -9,6 +9,7 @@
 #include "water/constants.hpp"
 #include "water/equations/saturation.hpp"
 #include "water/failure.hpp"
+#include "water/solve/assemble.hpp"
 #include "water/solve/bounds.hpp"
 #include "water/solve/density.hpp"
 
@@ -53,21 +54,6 @@ constexpr double kMargin = 0.1;
 
 // The same for a solution: nearer to a boundary than this (K), rounding could decide.
 constexpr double kCertain = 1e-6;
-
-Failure no_convergence() {
-  return make_failure(Fault::no_convergence, 0, "the iteration of IAPWS-IF97 did not converge");
-}
-
-State make_state(Region region, double pressure, double temperature, const Properties& at) {
-  State state;
-  state.pressure = pressure;
-  state.temperature = temperature;
-  state.volume = at.volume;
-  state.enthalpy = at.enthalpy;
-  state.entropy = at.entropy;
-  state.region = region;
-  return state;
-}
 
 template <Given kGiven>
 Properties with_given(Properties properties, double value) {
@@ -115,9 +101,9 @@ class Isobar {
   // The solution, kept inside the region against the last rounding.
   Outcome<Found> answer(Region region, const Inverse& inverse, double lowest,
                         double highest) const {
-    if (!inverse.converged) return no_convergence();
+    if (!inverse.converged) return not_converged();
     const double temperature = std::clamp(inverse.temperature, lowest, highest);
-    return found(make_state(region, pressure_, temperature, inverse.properties));
+    return found(assembled(region, pressure_, temperature, inverse.properties));
   }
 
   // In a gap between the properties of two regions at their boundary.
@@ -125,8 +111,8 @@ class Isobar {
                      const Properties& to) const {
     const double width = of(to) - of(from);
     const double weight = width > 0 ? std::clamp((value_ - of(from)) / width, 0.0, 1.0) : 0.0;
-    return found(make_state(lower_number, pressure_, temperature,
-                            with_given<kGiven>(mixed(from, to, weight), value_)));
+    return found(assembled(lower_number, pressure_, temperature,
+                           with_given<kGiven>(mixed(from, to, weight), value_)));
   }
 
   Outcome<Found> in_region_1(double highest) {
@@ -183,7 +169,7 @@ class Isobar {
         inverse.temperature > highest - kCertain) {
       return std::nullopt;
     }
-    return found(make_state(region, pressure_, inverse.temperature, inverse.properties));
+    return found(assembled(region, pressure_, inverse.temperature, inverse.properties));
   }
 
   std::optional<Found> well_inside_region_1(double highest) {
@@ -233,7 +219,7 @@ class Isobar {
     if (pressure_ < kCriticalPressure && may_be_two_phase()) {
       const Saturated saturated = saturated_at(pressure_);
       evaluations_ += saturated.evaluations;
-      if (!saturated.converged) return no_convergence();
+      if (!saturated.converged) return not_converged();
       if (value_ >= of(saturated.liquid) && value_ <= of(saturated.vapour)) {
         return between(saturated);
       }
@@ -256,18 +242,18 @@ class Isobar {
   Outcome<Found> in_region_3(double boundary) {
     const Inverse inverse = invert_region_3<kGiven>(pressure_, value_);
     evaluations_ += inverse.evaluations;
-    if (!inverse.converged) return no_convergence();
+    if (!inverse.converged) return not_converged();
     if (inverse.temperature < kTemperature13) {
       const DensityFound density = density_3(pressure_, kTemperature13, true);
       evaluations_ += density.evaluations;
-      if (!density.converged) return no_convergence();
+      if (!density.converged) return not_converged();
       return gap(Region::liquid, kTemperature13, properties_1(pressure_, kTemperature13),
                  properties_3(density.density, kTemperature13));
     }
     if (inverse.temperature > boundary) {
       const DensityFound density = density_3(pressure_, boundary, false);
       evaluations_ += density.evaluations;
-      if (!density.converged) return no_convergence();
+      if (!density.converged) return not_converged();
       return gap(Region::vapour, boundary, properties_3(density.density, boundary),
                  properties_2(pressure_, boundary));
     }
@@ -308,8 +294,8 @@ Saturated saturated_at(double pressure) {
 }
 
 State two_phase_state(double pressure, const Saturated& saturated, double dryness) {
-  State state = make_state(Region::two_phase, pressure, saturated.temperature,
-                           mixed(saturated.liquid, saturated.vapour, dryness));
+  State state = assembled(Region::two_phase, pressure, saturated.temperature,
+                          mixed(saturated.liquid, saturated.vapour, dryness));
   state.dryness = dryness;
   return state;
 }
