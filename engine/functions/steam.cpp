@@ -3,6 +3,7 @@
 #include "functions/describe.hpp"
 #include "functions/functions.hpp"
 #include "functions/sources.hpp"
+#include "functions/steam_arguments.hpp"
 #include "water/state.hpp"
 #include "water/stream.hpp"
 
@@ -93,13 +94,6 @@ Outcome<Pressure> saturation_pressure(Temperature t) {
 
 // --- Explanations ----------------------------------------------------------------------------
 
-void explain_pt(const Slot* in, const Result&, UnitSet units, std::string& text) {
-  const auto state = water::at_pressure_temperature(in[0].si, in[1].si);
-  if (!state) return;
-  describe_state(text, *state, units);
-  append_validity(text, units);
-}
-
 void explain_ph(const Slot* in, const Result&, UnitSet units, std::string& text) {
   const auto state = water::at_pressure_enthalpy(in[0].si, in[1].si);
   if (!state) return;
@@ -127,31 +121,16 @@ void explain_saturation(const Slot*, const Result&, UnitSet units, std::string& 
 // --- Rows ------------------------------------------------------------------------------------
 
 constexpr const char* kChapter = "Water and steam";
-constexpr double kMostPressure = 100e6;
-constexpr double kLeastTemperature = 273.15;
-constexpr double kMostTemperature = 2273.15;
-
-constexpr const char* kLimit = "the limit of IAPWS-IF97";
-constexpr Argument kPressure{"pressure", "Absolute pressure, never gauge", kAboveZero,
-                             kMostPressure, kLimit};
-constexpr Argument kTemperature{"temperature", "Temperature of the fluid", kLeastTemperature,
-                                kMostTemperature, kLimit};
-constexpr Argument kDryness{"dryness", "Mass of vapour over mass of fluid, from 0 to 1", 0, 1};
-constexpr Argument kEnthalpy{"enthalpy", "Specific enthalpy, zero near the triple point of water",
-                             -1e4, 8e6};
-constexpr Argument kEntropy{"entropy", "Specific entropy, zero near the triple point of water",
-                            -1e3, 2e4};
-constexpr Argument kFlow{"flow", "Mass flow; leave it out where it is not known", kAboveZero, 1e6};
-
-constexpr Argument kPressureTemperatureFlow[] = {kPressure, kTemperature, kFlow};
-constexpr Argument kPressureDrynessFlow[] = {kPressure, kDryness, kFlow};
-constexpr Argument kPressureEnthalpyFlow[] = {kPressure, kEnthalpy, kFlow};
-constexpr Argument kPressureEntropyFlow[] = {kPressure, kEntropy, kFlow};
-constexpr Argument kPressureTemperature[] = {kPressure, kTemperature};
-constexpr Argument kPressureEnthalpy[] = {kPressure, kEnthalpy};
-constexpr Argument kPressureEntropy[] = {kPressure, kEntropy};
-constexpr Argument kSaturationPressure[] = {kPressure};
-constexpr Argument kSaturationTemperature[] = {kTemperature};
+constexpr Argument kPressureTemperatureFlow[] = {kPressureArgument, kTemperatureArgument,
+                                                 kFlowArgument};
+constexpr Argument kPressureDrynessFlow[] = {kPressureArgument, kDrynessArgument, kFlowArgument};
+constexpr Argument kPressureEnthalpyFlow[] = {kPressureArgument, kEnthalpyArgument, kFlowArgument};
+constexpr Argument kPressureEntropyFlow[] = {kPressureArgument, kEntropyArgument, kFlowArgument};
+constexpr Argument kPressureTemperature[] = {kPressureArgument, kTemperatureArgument};
+constexpr Argument kPressureEnthalpy[] = {kPressureArgument, kEnthalpyArgument};
+constexpr Argument kPressureEntropy[] = {kPressureArgument, kEntropyArgument};
+constexpr Argument kSaturationPressure[] = {kPressureArgument};
+constexpr Argument kSaturationTemperature[] = {kTemperatureArgument};
 
 constexpr const char* kStreamResult = "A stream: one line of text that other functions take";
 constexpr const char* kWetNote =
@@ -211,7 +190,7 @@ constexpr Row kRows[] = {
                                             kSteamTables,
                                             {"STEAM_ENTHALPY(30; 26.85)", "115.331273"},
                                             kFirst},
-                                           kPressureTemperature, explain_pt),
+                                           kPressureTemperature, explain_pressure_temperature),
     row<at_pt<Entropy, &State::entropy>>({"STEAM_ENTROPY",
                                           kChapter,
                                           "Specific entropy at a pressure and a temperature",
@@ -220,7 +199,7 @@ constexpr Row kRows[] = {
                                           kSteamTables,
                                           {"STEAM_ENTROPY(30; 26.85)", "0.392294792"},
                                           kFirst},
-                                         kPressureTemperature, explain_pt),
+                                         kPressureTemperature, explain_pressure_temperature),
     row<at_pt<Volume, &State::volume>>({"STEAM_VOLUME",
                                         kChapter,
                                         "Specific volume at a pressure and a temperature",
@@ -229,7 +208,7 @@ constexpr Row kRows[] = {
                                         kSteamTables,
                                         {"STEAM_VOLUME(30; 26.85)", "0.00100215168"},
                                         kFirst},
-                                       kPressureTemperature, explain_pt),
+                                       kPressureTemperature, explain_pressure_temperature),
     row<density>({"STEAM_DENSITY",
                   kChapter,
                   "Density at a pressure and a temperature",
@@ -238,7 +217,7 @@ constexpr Row kRows[] = {
                   kSteamTables,
                   {"STEAM_DENSITY(30; 26.85)", "997.85294"},
                   kFirst},
-                 kPressureTemperature, explain_pt),
+                 kPressureTemperature, explain_pressure_temperature),
 
     row<at_ph<Temperature, &State::temperature>>(
         {"STEAM_TEMPERATURE_AT_ENTHALPY",
