@@ -35,7 +35,7 @@ TEST(StreamTable, LeavesEmptyWhatAStreamDoesNotCarry) {
   EXPECT_EQ(table.text_at(1, 0), "LBA10");
   EXPECT_EQ(table.number_at(1, 1), 3);
   EXPECT_EQ(table.number_at(1, 7), 0.88);
-  for (const std::size_t c : {0, 1, 7}) {
+  for (const std::size_t c : {0U, 1U, 7U}) {
     EXPECT_EQ(table.kind(2, c), BUSBAR_TEXT);
     EXPECT_EQ(table.text_at(2, c), "");
   }
