@@ -24,6 +24,7 @@ using testing::enthalpy_tolerance;
 using testing::entropy_tolerance;
 using testing::input;
 using testing::last_digit;
+using testing::near_a_boundary;
 using testing::number;
 using testing::read_rows;
 using testing::Row;
@@ -341,27 +342,7 @@ TEST(EnthalpyEntropy, EveryPairIsAnsweredOrRefused) {
 TEST(EnthalpyEntropy, Seams) {
   Sampler sampler(68);
   for (int k = 0; k < 20000; ++k) {
-    double p;
-    double t;
-    const double hair = sampler.between(-1e-6, 1e-6);
-    switch (k % 4) {
-      case 0:
-        p = sampler.between(kPressure13, kHighestPressure);
-        t = kTemperature13 * (1 + hair);
-        break;
-      case 1:
-        p = sampler.between(kPressure13 * 1.0001, kHighestPressure);
-        t = boundary_23_temperature(p) * (1 + hair);
-        break;
-      case 2:
-        p = sampler.log_between(1, kHighestPressure5);
-        t = kHighestTemperature2 * (1 + hair);
-        break;
-      default:
-        t = sampler.between(kLowestTemperature + 1, 646);
-        p = *saturation_pressure(t) * (1 + hair);
-        break;
-    }
+    const auto [p, t] = near_a_boundary(sampler, k, kLowestTemperature + 1);
     const State state = state_at(p, t);
     const auto found = at_enthalpy_entropy(state.enthalpy, state.entropy);
     ASSERT_TRUE(found) << found.failure().reason << " p " << p << " T " << t;

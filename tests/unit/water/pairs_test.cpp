@@ -19,6 +19,7 @@ namespace {
 
 using testing::enthalpy_tolerance;
 using testing::entropy_tolerance;
+using testing::near_a_boundary;
 using testing::Sampler;
 
 double internal_energy(const State& state) {
@@ -298,27 +299,7 @@ TEST(Pairs, EnthalpyAtATemperatureIsOftenAmbiguous) {
 TEST(Pairs, Seams) {
   Sampler sampler(79);
   for (int k = 0; k < 8000; ++k) {
-    double p;
-    double t;
-    const double hair = sampler.between(-1e-6, 1e-6);
-    switch (k % 4) {
-      case 0:
-        p = sampler.between(kPressure13, kHighestPressure);
-        t = kTemperature13 * (1 + hair);
-        break;
-      case 1:
-        p = sampler.between(kPressure13 * 1.0001, kHighestPressure);
-        t = boundary_23_temperature(p) * (1 + hair);
-        break;
-      case 2:
-        p = sampler.log_between(1, kHighestPressure5);
-        t = kHighestTemperature2 * (1 + hair);
-        break;
-      default:
-        t = sampler.between(kLowestTemperature + 10, 646);
-        p = *saturation_pressure(t) * (1 + hair);
-        break;
-    }
+    const auto [p, t] = near_a_boundary(sampler, k, kLowestTemperature + 10);
     const State state = *at_pressure_temperature(p, t);
     const auto pv = at_pressure_volume(p, state.volume);
     ASSERT_TRUE(pv) << p << " " << t;
