@@ -9,6 +9,7 @@
 #include <set>
 
 #include "formula.hpp"
+#include "paths.hpp"
 #include "printed.hpp"
 
 namespace busbar::reference {
@@ -66,8 +67,7 @@ TEST(Catalogue, EveryRowHasSourceExampleResultAndVersion) {
 
 TEST(Catalogue, EveryRowHasItsReferenceFile) {
   for (const Function& function : catalogue()) {
-    EXPECT_TRUE(std::filesystem::exists(std::filesystem::path(BUSBAR_REFERENCE_DIR) /
-                                        function.reference_file()))
+    EXPECT_TRUE(std::filesystem::exists(support::reference_directory() / function.reference_file()))
         << function.reference_file();
   }
 }
@@ -75,7 +75,7 @@ TEST(Catalogue, EveryRowHasItsReferenceFile) {
 TEST(Catalogue, EveryReferenceFileHasItsRow) {
   std::set<std::string> expected;
   for (const Function& function : catalogue()) expected.insert(function.reference_file());
-  const std::filesystem::path root(BUSBAR_REFERENCE_DIR);
+  const std::filesystem::path root = support::reference_directory();
   for (const auto& entry : std::filesystem::recursive_directory_iterator(root)) {
     const std::string path = std::filesystem::relative(entry.path(), root).generic_string();
     // Tables of the releases themselves, read by the tests of the water domain.
@@ -117,23 +117,20 @@ TEST(Catalogue, RequiredArgumentsStandBeforeOptionalOnes) {
 }
 
 TEST(Catalogue, NamesAndArgumentOrdersNeverChange) {
-  std::ifstream file(std::string(BUSBAR_ENGINE_DIR) + "/functions/names.lock");
+  std::ifstream file(support::engine_directory() / "functions/names.lock");
   ASSERT_TRUE(file) << "engine/functions/names.lock is missing";
   std::vector<std::string> locked;
   for (std::string line; std::getline(file, line);) locked.push_back(line);
-  std::vector<std::string> present;
-  for (const Function& function : catalogue()) present.push_back(function.signature());
+  EXPECT_TRUE(std::is_sorted(locked.begin(), locked.end())) << "names.lock: LC_ALL=C sort";
+  std::set<std::string> present;
+  for (const Function& function : catalogue()) present.insert(function.signature());
 
-  auto from = present.begin();
   for (const std::string& line : locked) {
-    const auto found = std::find(from, present.end(), line);
-    EXPECT_NE(found, present.end())
-        << line << " stands in names.lock but not, or not in this order, in the catalogue: names "
-        << "and argument orders are for ever";
-    if (found != present.end()) from = found + 1;
+    EXPECT_TRUE(present.count(line)) << line << " stands in names.lock but not in the catalogue: "
+                                     << "names and argument orders are for ever";
   }
   for (const std::string& line : present) {
-    EXPECT_NE(std::find(locked.begin(), locked.end(), line), locked.end())
+    EXPECT_TRUE(std::binary_search(locked.begin(), locked.end(), line))
         << "add to engine/functions/names.lock: " << line;
   }
 }

@@ -18,6 +18,7 @@
 #include "catalogue.hpp"
 #include "csv.hpp"
 #include "formula.hpp"
+#include "paths.hpp"
 #include "printed.hpp"
 
 namespace busbar::reference {
@@ -81,7 +82,7 @@ double tolerance(const CsvLine& line, double expected, double central) {
 class PublishedFigures : public testing::TestWithParam<Function> {};
 
 TEST_P(PublishedFigures, AreReproduced) {
-  const std::string path = std::string(BUSBAR_REFERENCE_DIR) + '/' + GetParam().reference_file();
+  const std::string path = (support::reference_directory() / GetParam().reference_file()).string();
   const support::Csv csv = support::read_csv(path);
   ASSERT_FALSE(csv.lines.empty()) << path;
   std::set<std::string> ids;

@@ -10,6 +10,7 @@
 #include <string>
 
 #include "calls.hpp"
+#include "paths.hpp"
 
 namespace busbar {
 namespace {
@@ -32,7 +33,8 @@ std::vector<std::string> literals(const std::filesystem::path& path) {
 TEST(Templates, HoldNoBrokenPlaceForAMeasure) {
   static const std::regex kPlace("\\{[012]\\}");
   int places = 0;
-  for (const auto& entry : std::filesystem::recursive_directory_iterator(BUSBAR_ENGINE_DIR)) {
+  for (const auto& entry :
+       std::filesystem::recursive_directory_iterator(support::engine_directory())) {
     const auto extension = entry.path().extension();
     if (extension != ".cpp" && extension != ".hpp") continue;
     for (const std::string& literal : literals(entry.path())) {

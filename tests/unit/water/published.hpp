@@ -9,6 +9,8 @@
 #include <string>
 #include <vector>
 
+#include "paths.hpp"
+
 namespace busbar::water::testing {
 
 /// A row of a reference file by column name.
@@ -26,7 +28,7 @@ inline std::vector<std::string> split(const std::string& line) {
 
 /// All rows of a file; empty when it cannot be read (each test asserts that it is not).
 inline std::vector<Row> read_rows(const std::string& file) {
-  std::ifstream in(std::string(BUSBAR_REFERENCE_DIR) + "/water-releases/" + file);
+  std::ifstream in(support::reference_directory() / "water-releases" / file);
   std::vector<Row> rows;
   std::string line;
   std::vector<std::string> names;
