@@ -32,6 +32,11 @@ enum class Quantity : std::uint8_t {
   viscosity,               ///< dynamic, Pa s
   thermal_conductivity,    ///< W/(m K)
   surface_tension,         ///< N/m
+  heating_value,           ///< of a fuel by mass, J/kg
+  molar_heating_value,     ///< J/mol
+  volume_heating_value,    ///< by volume at stated reference conditions, J/m3
+  molar_mass,              ///< kg/mol
+  molar_volume,            ///< m3/mol
   same_unit,               ///< any unit; the result of the function is in the same one
   count_
 };
@@ -66,6 +71,11 @@ using JouleThomson = Of<Quantity::joule_thomson>;
 using Viscosity = Of<Quantity::viscosity>;
 using ThermalConductivity = Of<Quantity::thermal_conductivity>;
 using SurfaceTension = Of<Quantity::surface_tension>;
+using HeatingValue = Of<Quantity::heating_value>;
+using MolarHeatingValue = Of<Quantity::molar_heating_value>;
+using VolumeHeatingValue = Of<Quantity::volume_heating_value>;
+using MolarMass = Of<Quantity::molar_mass>;
+using MolarVolume = Of<Quantity::molar_volume>;
 using SameUnit = Of<Quantity::same_unit>;
 
 }  // namespace busbar

@@ -20,6 +20,7 @@ constexpr double kCubicFoot = kFoot * kFoot * kFoot;
 constexpr double kFall = 9.80665;
 constexpr double kPsi = kPound * kFall / (0.0254 * 0.0254);
 constexpr double kBtu = 1055.05585262;
+constexpr double kPoundMole = 453.59237;  // mol
 constexpr double kFahrenheitZero = 459.67 * 5 / 9;
 
 struct QuantityUnits {
@@ -62,6 +63,15 @@ constexpr std::array<QuantityUnits, kQuantities> kTable{{
        {"W/(m K)", 1, 1, 0}}}},
     {"surface tension",
      {{{"mN/m", 1, 1e3, 0}, {"lbf/ft", kPound* kFall / kFoot, 1, 0}, {"N/m", 1, 1, 0}}}},
+    {"heating value", {{{"MJ/kg", 1e6, 1, 0}, {"Btu/lb", 2326, 1, 0}, {"J/kg", 1, 1, 0}}}},
+    {"molar heating value",
+     {{{"kJ/mol", 1e3, 1, 0}, {"Btu/lbmol", kBtu, kPoundMole, 0}, {"J/mol", 1, 1, 0}}}},
+    {"heating value by volume",
+     {{{"MJ/m³", 1e6, 1, 0}, {"Btu/ft³", kBtu, kCubicFoot, 0}, {"J/m³", 1, 1, 0}}}},
+    {"molar mass",
+     {{{"kg/kmol", 1, 1e3, 0}, {"lb/lbmol", kPound, kPoundMole, 0}, {"kg/mol", 1, 1, 0}}}},
+    {"molar volume",
+     {{{"m³/kmol", 1, 1e3, 0}, {"ft³/lbmol", kCubicFoot, kPoundMole, 0}, {"m³/mol", 1, 1, 0}}}},
     {"amount", {kOne, kOne, kOne}},
 }};
 

@@ -65,6 +65,7 @@ constexpr std::array kSymbols{
     plain("klb", kMass, 1e3 * kPound),
     plain("oz", kMass, kPound / 16),
     prefixed("mol", kAmount, 1),
+    plain("lbmol", kAmount, 1e3 * kPound),
     // Length, area, volume
     prefixed("m", kLength, 1),
     plain("in", kLength, kInch),
