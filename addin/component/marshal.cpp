@@ -6,7 +6,6 @@
 #include <cstddef>
 #include <new>
 #include <rtl/ustring.hxx>
-#include <string>
 
 #include "text.hpp"
 
@@ -41,12 +40,11 @@ Taken status(std::int32_t code) {
   }
 }
 
-// One cell of a value that is being filled; `buffer` keeps its memory from text to text.
+// One cell of a value that is being filled.
 struct Cell {
   busbar_value* value;
   std::size_t row;
   std::size_t column;
-  std::string& buffer;
 };
 
 Taken put(const Cell& cell, double number) {
@@ -63,10 +61,9 @@ Taken put(const Cell& cell, sal_Int32 number) {
 Taken put(const Cell& cell, const OUString& text) {
   if (text.isEmpty()) return status(busbar_set_blank(cell.value, cell.row, cell.column));
   if (static_cast<std::size_t>(text.getLength()) > busbar_text_limit()) return Taken::too_large;
-  cell.buffer.clear();
-  append_utf8(cell.buffer, text);
+  const Utf8 bytes(text);
   return status(
-      busbar_set_text(cell.value, cell.row, cell.column, cell.buffer.data(), cell.buffer.size()));
+      busbar_set_text(cell.value, cell.row, cell.column, bytes.view().data(), bytes.view().size()));
 }
 
 // A number of any UNO type; false for what is none.
@@ -115,13 +112,12 @@ Taken table_to_engine(const Table<T>& table, Value& value) {
   if (columns > busbar_cell_limit() / rows) return Taken::too_large;
   Value filled(busbar_value_create(rows, columns));
   if (!filled) return Taken::no_memory;
-  std::string buffer;
   for (std::size_t r = 0; r < rows; ++r) {
     const Sequence<T>& row = table[static_cast<sal_Int32>(r)];
     const T* const cells = row.getConstArray();
     const auto length = static_cast<std::size_t>(row.getLength());
     for (std::size_t c = 0; c < length; ++c) {
-      const Taken taken = put(Cell{filled.get(), r, c, buffer}, cells[c]);
+      const Taken taken = put(Cell{filled.get(), r, c}, cells[c]);
       if (taken != Taken::value) return taken;
     }
   }
@@ -147,15 +143,14 @@ Taken scalar_to_engine(const Any& any, Value& value) {
     // An empty text stays one: unlike in a table, it cannot be a blank cell.
     const auto& text = *static_cast<const OUString*>(any.getValue());
     if (static_cast<std::size_t>(text.getLength()) > busbar_text_limit()) return Taken::too_large;
-    const std::string bytes = to_utf8(text);
-    if (bytes.size() > busbar_text_limit()) return Taken::too_large;
-    value.reset(busbar_text(bytes.data(), bytes.size()));
+    const Utf8 bytes(text);
+    if (bytes.view().size() > busbar_text_limit()) return Taken::too_large;
+    value.reset(busbar_text(bytes.view().data(), bytes.view().size()));
     return value ? Taken::value : Taken::no_memory;
   }
   Value single(busbar_value_create(1, 1));
   if (!single) return Taken::no_memory;
-  std::string buffer;
-  const Taken taken = put(Cell{single.get(), 0, 0, buffer}, any);
+  const Taken taken = put(Cell{single.get(), 0, 0}, any);
   if (taken == Taken::value) value = std::move(single);
   return taken;
 }

@@ -150,6 +150,23 @@ Outcome<State> at_pressure_enthalpy(double pressure, double enthalpy) {
   return at_pressure_and<Given::enthalpy>(pressure, enthalpy, Quantity::enthalpy);
 }
 
+Outcome<State> at_pressure_enthalpy_near(double pressure, double enthalpy, double temperature) {
+  // Some last digits: a hundred thousand times closer than at_pressure_enthalpy promises.
+  constexpr double kSame = 2e-15;
+  constexpr double kScale = kGasConstant * 1386;  // R T* of region 1
+  const Outcome<State> expected = at_pressure_temperature(pressure, temperature);
+  if (expected) {
+    const double rest = enthalpy - expected->enthalpy;
+    if (std::fabs(rest) <= kSame * std::fmax(std::fabs(enthalpy), kScale)) {
+      State state = *expected;
+      state.enthalpy = enthalpy;
+      state.entropy += rest / temperature;
+      return state;
+    }
+  }
+  return at_pressure_enthalpy(pressure, enthalpy);
+}
+
 Outcome<State> at_pressure_entropy(double pressure, double entropy) {
   return at_pressure_and<Given::entropy>(pressure, entropy, Quantity::entropy);
 }

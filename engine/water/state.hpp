@@ -46,6 +46,12 @@ Outcome<State> at_pressure_temperature(double pressure, double temperature);
 /// Source: as above; started from the backward equations of R7-97(2012) and SR3-03(2014).
 Outcome<State> at_pressure_enthalpy(double pressure, double enthalpy);
 
+/// The same where the temperature (K) was computed before, as a stream carries it: one evaluation
+/// of the basic equation where both belong together to the last digits, and otherwise the answer of
+/// at_pressure_enthalpy, whatever the temperature. In an overlap of two regions the temperature
+/// tells which one the state was found in.
+Outcome<State> at_pressure_enthalpy_near(double pressure, double enthalpy, double temperature);
+
 /// State at pressure (Pa) and specific entropy (J/(kg K)), as exact as at_pressure_enthalpy.
 Outcome<State> at_pressure_entropy(double pressure, double entropy);
 

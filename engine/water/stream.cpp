@@ -21,9 +21,10 @@ Phase phase_of(const State& state) {
 }  // namespace
 
 Outcome<State> state_of(const Stream& stream) {
-  Outcome<State> state = stream.phase == Phase::two_phase
-                             ? at_pressure_dryness(stream.pressure, stream.dryness)
-                             : at_pressure_enthalpy(stream.pressure, stream.enthalpy);
+  Outcome<State> state =
+      stream.phase == Phase::two_phase
+          ? at_pressure_dryness(stream.pressure, stream.dryness)
+          : at_pressure_enthalpy_near(stream.pressure, stream.enthalpy, stream.temperature);
   if (!state) return state.failure().about(1);
   return state;
 }

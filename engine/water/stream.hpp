@@ -10,7 +10,8 @@
 namespace busbar::water {
 
 /// The full state of a stream, found from what its text carries exactly: pressure and dryness where
-/// it is wet, pressure and enthalpy elsewhere. Failures as at_pressure_enthalpy, argument 1.
+/// it is wet, pressure and enthalpy elsewhere, where the temperature only spares an iteration.
+/// Failures as at_pressure_enthalpy, argument 1.
 Outcome<State> state_of(const Stream& stream);
 
 /// A stream in a state.

@@ -24,6 +24,7 @@ from harness.profile import Profile, run_unopkg  # noqa: E402
 EMPTY_NUMBER = "=EMPTY_THREE(A1;B1)"
 EMPTY_TEXT = "=EMPTY_TEXT(A1;B1;55)"
 EMPTY_TEXT_BACK = "=EMPTY_TEXT(D1;4;0.88)"
+EMPTY_TEXT_BACK_THREE = "=EMPTY_TEXT_THREE(D1;4)"
 
 # name, formula in the first row, name of its yardstick
 LINES = [
@@ -35,8 +36,11 @@ LINES = [
     ("STEAM_TEMPERATURE_AT_ENTHALPY", "=STEAM_TEMPERATURE_AT_ENTHALPY(A1;C1)", "empty, 2 numbers in"),
     ("empty, text out", EMPTY_TEXT, None),
     ("STEAM", "=STEAM(A1;B1;55)", "empty, text out"),
-    ("empty, text in and out", EMPTY_TEXT_BACK, None),
-    ("TURBINE_OUT", "=TURBINE_OUT(D1;4;0.88)", "empty, text in and out"),
+    ("empty, text, 2 numbers in, text out", EMPTY_TEXT_BACK, None),
+    ("TURBINE_OUT", "=TURBINE_OUT(D1;4;0.88)", "empty, text, 2 numbers in, text out"),
+    ("empty, text and number in, text out", EMPTY_TEXT_BACK_THREE, None),
+    ("SET_FLOW", "=SET_FLOW(D1;60)", "empty, text and number in, text out"),
+    ("VALVE_OUT", "=VALVE_OUT(D1;4)", "empty, text and number in, text out"),
     ("empty, text in, number out", "=EMPTY_TWO(D1)", None),
     ("ENTHALPY_OF", "=ENTHALPY_OF(D1)", "empty, text in, number out"),
     ("ENTROPY_OF", "=ENTROPY_OF(D1)", "empty, text in, number out"),
@@ -89,7 +93,7 @@ def resident(office):
 
 def report(name, nanoseconds, base):
     ratio = "" if base is None else f"{nanoseconds / base:8.2f}"
-    print(f"{name:34s}{nanoseconds:10.0f} ns{ratio}", flush=True)
+    print(f"{name:38s}{nanoseconds:10.0f} ns{ratio}", flush=True)
 
 
 def measure_cells(office, count, repeats):

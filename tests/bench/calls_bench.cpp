@@ -136,6 +136,22 @@ void steam_stream(benchmark::State& state) {
   }
 }
 
+// A stream read and written again with another flow: what the text form itself costs.
+void set_flow(benchmark::State& state) {
+  const busbar_function* called = function("SET_FLOW");
+  std::size_t i = 0;
+  for (auto _ : state) {
+    const std::string& stream = inputs().stream[i];
+    busbar_value* arguments[] = {busbar_text(stream.data(), stream.size()), busbar_number(60)};
+    busbar_value* result = nullptr;
+    busbar_call(called, arguments, 2, &result);
+    benchmark::DoNotOptimize(busbar_get_text(result, 0, 0, nullptr));
+    busbar_value_free(result);
+    for (busbar_value* argument : arguments) busbar_value_free(argument);
+    i = (i + 1) % kStates;
+  }
+}
+
 // A stage: stream in, stream out, an isentropic and an enthalpy solve between.
 void turbine_out(benchmark::State& state) {
   const busbar_function* called = function("TURBINE_OUT");
@@ -199,6 +215,7 @@ BENCHMARK(carnot);
 BENCHMARK(steam_enthalpy);
 BENCHMARK(temperature_at_enthalpy);
 BENCHMARK(steam_stream);
+BENCHMARK(set_flow);
 BENCHMARK(turbine_out);
 BENCHMARK(enthalpy_of);
 BENCHMARK(entropy_of);
