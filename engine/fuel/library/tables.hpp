@@ -1,0 +1,237 @@
+// Figures of the fuel library, as published. The list is data; library.hpp says what its columns
+// are.
+#pragma once
+
+#include <array>
+
+#include "fuel/library/library.hpp"
+
+namespace busbar::fuel::library::tables {
+
+inline constexpr double kBtuPerPound = 2326;  // J/kg, exact
+
+inline constexpr std::string_view kNasa =
+    "computed from the enthalpies of formation at 25 °C of McBride, Zehe and Gordon, "
+    "NASA/TP-2002-211556";
+inline constexpr std::string_view kIpcc =
+    "IPCC 2006 Guidelines for National Greenhouse Gas Inventories, volume 2, table 1.2";
+inline constexpr std::string_view kFuelEu = "Regulation (EU) 2023/1805, annex II";
+inline constexpr std::string_view kGreet =
+    "Argonne National Laboratory, GREET fuel specifications, older release";
+inline constexpr std::string_view kCengel =
+    "Cengel and Boles, Thermodynamics: An Engineering Approach, table A-27";
+inline constexpr std::string_view kArgonne =
+    "Vorres, Energy and Fuels 4 (1990) 420; Users Handbook for the Argonne Premium Coal Sample "
+    "Program, ANL/PCSP-93/1";
+inline constexpr std::string_view kGhugare =
+    "Ghugare et al., BioEnergy Research 7 (2014) 681, table S.2";
+
+inline constexpr std::string_view kPure = "pure substance; computed, reproduces published values";
+inline constexpr std::string_view kTypicalAgree = "typical; two transcriptions agree";
+inline constexpr std::string_view kTypicalOnce = "typical; one transcription";
+inline constexpr std::string_view kTypicalMemory = "typical; from memory: check before use";
+inline constexpr std::string_view kTypicalComputed = "typical; computed from the composition";
+inline constexpr std::string_view kSampleAgree =
+    "one sample, not typical of a mine; two transcriptions agree";
+inline constexpr std::string_view kSampleMemory =
+    "one sample, not typical of a mine; from memory, atomic ratios confirmed: check before use";
+inline constexpr std::string_view kSampleOnce =
+    "one sample; one transcription, ash as what the elements leave";
+
+inline constexpr std::array kFuels{
+    TypicalFuel{"hydrogen (NASA)", "gas", 119.961e6, 141.789e6, "pure gas", "mole %: H2 100", "",
+                kNasa, kPure},
+    TypicalFuel{"methane (NASA)", "gas", 50.027e6, 55.513e6, "pure gas", "mole %: CH4 100", "",
+                kNasa, kPure},
+    TypicalFuel{"ammonia (NASA)", "gas", 18.602e6, 22.478e6, "pure gas", "mole %: NH3 100", "",
+                kNasa, kPure},
+    TypicalFuel{"carbon monoxide (NASA)", "gas", 10.103e6, 10.103e6, "pure gas", "mole %: CO 100",
+                "", kNasa, kPure},
+    TypicalFuel{"propane (NASA)", "gas", 46.335e6, 50.326e6, "pure gas", "mole %: C3H8 100", "",
+                kNasa, kPure},
+    TypicalFuel{"methanol (NASA)", "liquid", 19.919e6, 22.666e6, "pure liquid",
+                "mass % dry: C 37.484, H 12.583, O 49.933", "", kNasa, kPure},
+    TypicalFuel{"ethanol (NASA)", "liquid", 26.808e6, 29.673e6, "pure liquid",
+                "mass % dry: C 52.143, H 13.128, O 34.730", "", kNasa, kPure},
+    TypicalFuel{"n-octane (NASA)", "liquid", 44.422e6, 47.889e6, "pure liquid",
+                "mass % dry: C 84.117, H 15.883", "", kNasa, kPure},
+    TypicalFuel{"natural gas (IPCC 2006)", "gas", 48.0e6, kNotStated, "gas as sold", "", "", kIpcc,
+                kTypicalOnce},
+    TypicalFuel{"natural gas (ISO 6976 example 1)", "gas", kNotStated, kNotStated, "",
+                "mole %: CH4 93.3212, C2H6 2.5656, C3H8 1.5368, N2 1.035, CO2 1.5414", "",
+                "ISO 6976:2016, annex D, example 1", kTypicalAgree},
+    TypicalFuel{"LNG (FuelEU)", "gas", 49.1e6, kNotStated, "fuel as bunkered", "",
+                "2.75 kg CO2 per kg burnt", kFuelEu, kTypicalOnce},
+    TypicalFuel{"LPG (IPCC 2006)", "gas", 47.3e6, kNotStated, "fuel as sold", "", "", kIpcc,
+                kTypicalOnce},
+    TypicalFuel{"biogas, 60 % methane", "gas", 17.684e6, kNotStated, "dry gas",
+                "mole %: CH4 60, CO2 40", "21.484 MJ/m3 net at 0 °C and 101.325 kPa",
+                "ISO 6976:2016, net molar value of methane at 25 °C, 802.55 kJ/mol",
+                kTypicalComputed},
+    TypicalFuel{"methane of biogas (IPCC 2006)", "gas", 50.4e6, kNotStated,
+                "the methane part alone", "", "", kIpcc, kTypicalOnce},
+    TypicalFuel{"hydrogen (FuelEU)", "gas", 120.0e6, kNotStated, "fuel as bunkered", "", "",
+                kFuelEu, kTypicalAgree},
+    TypicalFuel{"ammonia (FuelEU)", "gas", 18.6e6, kNotStated, "fuel as bunkered", "", "", kFuelEu,
+                kTypicalAgree},
+    TypicalFuel{"methanol (FuelEU)", "liquid", 19.9e6, kNotStated, "fuel as bunkered", "",
+                "1.375 kg CO2 per kg burnt", kFuelEu, kTypicalAgree},
+    TypicalFuel{"diesel (IPCC 2006)", "liquid", 43.0e6, kNotStated, "fuel as sold", "", "", kIpcc,
+                kTypicalOnce},
+    TypicalFuel{"diesel, low sulphur (GREET)", "liquid", 42.613e6, 45.576e6, "fuel as sold", "",
+                "847 kg/m3, 87.1 % carbon", kGreet, kTypicalMemory},
+    TypicalFuel{"diesel, light (Cengel and Boles)", "liquid", 43.2e6, 46.1e6, "fuel as sold", "",
+                "780 to 840 kg/m3 at 20 °C", kCengel, kTypicalMemory},
+    TypicalFuel{"diesel, heavy (Cengel and Boles)", "liquid", 42.8e6, 45.5e6, "fuel as sold", "",
+                "820 to 880 kg/m3 at 20 °C", kCengel, kTypicalMemory},
+    TypicalFuel{"marine gas oil (FuelEU)", "liquid", 42.7e6, kNotStated, "fuel as bunkered", "",
+                "3.206 kg CO2 per kg burnt", kFuelEu, kTypicalAgree},
+    TypicalFuel{"heavy fuel oil (IPCC 2006)", "liquid", 40.4e6, kNotStated, "fuel as sold", "", "",
+                kIpcc, kTypicalOnce},
+    TypicalFuel{"heavy fuel oil (FuelEU)", "liquid", 40.5e6, kNotStated, "fuel as bunkered", "",
+                "3.114 kg CO2 per kg burnt", kFuelEu, kTypicalAgree},
+    TypicalFuel{"heavy fuel oil (GREET)", "liquid", 39.467e6, 42.210e6, "fuel as sold", "",
+                "991 kg/m3, 86.8 % carbon", kGreet, kTypicalMemory},
+    TypicalFuel{"heavy fuel oil, 3 % sulphur", "liquid", kNotStated, 42.9e6, "fuel as sold", "",
+                "85.1 % carbon, 10.9 % hydrogen, 3 % sulphur, which add to 99 %", "handbook values",
+                kTypicalMemory},
+    TypicalFuel{"fuel oil, very low sulphur (FuelEU)", "liquid", 41.0e6, kNotStated,
+                "fuel as bunkered", "", "", kFuelEu, kTypicalOnce},
+    TypicalFuel{"petrol (IPCC 2006)", "liquid", 44.3e6, kNotStated, "fuel as sold", "", "", kIpcc,
+                kTypicalOnce},
+    TypicalFuel{"biodiesel (IPCC 2006)", "liquid", 27.0e6, kNotStated, "fuel as sold", "",
+                "a tenth and more below measured values; FuelEU gives 37.2 MJ/kg", kIpcc,
+                kTypicalOnce},
+    TypicalFuel{"biodiesel (FuelEU)", "liquid", 37.2e6, kNotStated, "fuel as bunkered", "", "",
+                kFuelEu, kTypicalOnce},
+    TypicalFuel{"anthracite (IPCC 2006)", "solid", 26.7e6, kNotStated, "fuel as received", "", "",
+                kIpcc, kTypicalOnce},
+    TypicalFuel{"coking coal (IPCC 2006)", "solid", 28.2e6, kNotStated, "fuel as received", "", "",
+                kIpcc, kTypicalOnce},
+    TypicalFuel{"bituminous coal, other (IPCC 2006)", "solid", 25.8e6, kNotStated,
+                "fuel as received", "", "", kIpcc, kTypicalOnce},
+    TypicalFuel{"subbituminous coal (IPCC 2006)", "solid", 18.9e6, kNotStated, "fuel as received",
+                "", "", kIpcc, kTypicalOnce},
+    TypicalFuel{"lignite (IPCC 2006)", "solid", 11.9e6, kNotStated, "fuel as received", "", "",
+                kIpcc, kTypicalOnce},
+    TypicalFuel{"petroleum coke (IPCC 2006)", "solid", 32.5e6, kNotStated, "fuel as received", "",
+                "", kIpcc, kTypicalOnce},
+    TypicalFuel{"peat (IPCC 2006)", "solid", 9.76e6, kNotStated, "fuel as received", "", "", kIpcc,
+                kTypicalOnce},
+    TypicalFuel{"wood and wood waste (IPCC 2006)", "solid", 15.6e6, kNotStated, "fuel as received",
+                "", "", kIpcc, kTypicalOnce},
+    TypicalFuel{"primary solid biomass, other (IPCC 2006)", "solid", 11.6e6, kNotStated,
+                "fuel as received", "", "", kIpcc, kTypicalOnce},
+    TypicalFuel{"municipal waste, non-biomass fraction (IPCC 2006)", "solid", 10.0e6, kNotStated,
+                "fuel as received", "", "", kIpcc, kTypicalOnce},
+    TypicalFuel{"municipal waste, biomass fraction (IPCC 2006)", "solid", 11.6e6, kNotStated,
+                "fuel as received", "", "", kIpcc, kTypicalOnce},
+    TypicalFuel{
+        "bituminous coal, Pittsburgh No. 8 (Argonne)", "solid", kNotStated, 13404 * kBtuPerPound,
+        "as received", "mass % dry: C 75.5, H 4.83, O 6.63, N 1.49, S 2.19, Cl 0.11, ash 9.25",
+        "moisture 1.65 % as received, volatile matter 37.2 % as received", kArgonne, kSampleAgree},
+    TypicalFuel{
+        "bituminous coal, Illinois No. 6 (Argonne)", "solid", kNotStated, 10999 * kBtuPerPound,
+        "as received", "mass % dry: C 65.65, H 4.23, O 8.6, N 1.16, S 4.83, Cl 0.05, ash 15.48",
+        "moisture 7.97 % as received, volatile matter 36.86 % as received", kArgonne, kSampleAgree},
+    TypicalFuel{"bituminous coal, Blind Canyon (Argonne)", "solid", kNotStated,
+                13280 * kBtuPerPound, "as received",
+                "mass % dry: C 76.89, H 5.49, O 10.79, N 1.5, S 0.62, ash 4.71",
+                "moisture 4.63 % as received, volatile matter 43.72 % as received", kArgonne,
+                kSampleMemory},
+    TypicalFuel{"bituminous coal, Upper Freeport (Argonne)", "solid", kNotStated,
+                13315 * kBtuPerPound, "as received",
+                "mass % dry: C 74.23, H 4.08, O 4.84, N 1.35, S 2.32, ash 13.18",
+                "moisture 1.13 % as received, volatile matter 27.14 % as received", kArgonne,
+                kSampleMemory},
+    TypicalFuel{"bituminous coal, Pocahontas No. 3 (Argonne)", "solid", kNotStated,
+                14926 * kBtuPerPound, "as received",
+                "mass % dry: C 86.71, H 4.23, O 2.36, N 1.27, S 0.66, ash 4.77",
+                "moisture 0.65 % as received, volatile matter 18.48 % as received", kArgonne,
+                kSampleMemory},
+    TypicalFuel{"subbituminous coal, Wyodak-Anderson (Argonne)", "solid", kNotStated,
+                8426 * kBtuPerPound, "as received",
+                "mass % dry: C 68.43, H 4.88, O 16.24, N 1.02, S 0.63, Cl 0.03, ash 8.77",
+                "moisture 28.09 % as received, volatile matter 32.17 % as received", kArgonne,
+                kSampleAgree},
+    TypicalFuel{"anthracite (Ghugare 2014)", "solid", kNotStated, 31.840e6, "dry fuel",
+                "mass % dry: C 86.78, H 1.63, O 1.96, N 0.65, S 0.92, ash 8.06", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"lignite (Ghugare 2014)", "solid", kNotStated, 23.350e6, "dry fuel",
+                "mass % dry: C 60.97, H 4.07, O 18.5, N 1.02, S 1.81, ash 13.63", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"lignite, German (Ghugare 2014)", "solid", kNotStated, 25.100e6, "dry fuel",
+                "mass % dry: C 63.89, H 4.97, O 24.54, N 0.57, S 0.48, ash 5.55", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"coke (Ghugare 2014)", "solid", kNotStated, 31.124e6, "dry fuel",
+                "mass % dry: C 89.13, H 0.43, O 0.98, N 0.85, S 1, ash 7.61", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"peat (Ghugare 2014)", "solid", kNotStated, 22.000e6, "dry fuel",
+                "mass % dry: C 54.81, H 5.38, O 35.81, N 0.89, S 0.11, ash 3", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"charcoal (Ghugare 2014)", "solid", kNotStated, 34.388e6, "dry fuel",
+                "mass % dry: C 92.04, H 2.45, O 2.96, N 0.53, S 1, ash 1.02", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"wood, beech (Ghugare 2014)", "solid", kNotStated, 19.507e6, "dry fuel",
+                "mass % dry: C 49.69, H 6.07, O 43.81, N 0.41, S 0.02", "", kGhugare, kSampleOnce},
+    TypicalFuel{"wood, Douglas fir (Ghugare 2014)", "solid", kNotStated, 22.098e6, "dry fuel",
+                "mass % dry: C 56.2, H 5.9, O 36.7, ash 1.2", "", kGhugare, kSampleOnce},
+    TypicalFuel{"wood, pine chips (Ghugare 2014)", "solid", kNotStated, 19.790e6, "dry fuel",
+                "mass % dry: C 49.66, H 5.67, O 38.07, N 0.51, S 0.08, ash 6.01", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"wood, poplar (Ghugare 2014)", "solid", kNotStated, 19.380e6, "dry fuel",
+                "mass % dry: C 48.45, H 5.85, O 43.69, N 0.47, S 0.01, ash 1.53", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"wood, eucalyptus (Ghugare 2014)", "solid", kNotStated, 19.230e6, "dry fuel",
+                "mass % dry: C 48.18, H 5.92, O 44.18, N 0.39, S 0.01, ash 1.32", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"straw, wheat (Ghugare 2014)", "solid", kNotStated, 17.510e6, "dry fuel",
+                "mass % dry: C 43.2, H 5, O 39.4, N 0.61, S 0.11, ash 11.68", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"straw, barley (Ghugare 2014)", "solid", kNotStated, 18.467e6, "dry fuel",
+                "mass % dry: C 44.3, H 5.5, O 41.7, N 0.7, S 0.2, ash 7.6", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"straw, rape (Ghugare 2014)", "solid", kNotStated, 18.340e6, "dry fuel",
+                "mass % dry: C 46.17, H 6.12, O 42.47, N 0.46, S 0.1, ash 4.68", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"straw, rice (Ghugare 2014)", "solid", kNotStated, 15.090e6, "dry fuel",
+                "mass % dry: C 38.24, H 5.2, O 36.26, N 0.87, S 0.18, ash 19.25", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"corn stover (Ghugare 2014)", "solid", kNotStated, 19.000e6, "dry fuel",
+                "mass % dry: C 46.5, H 5.81, O 39.67, N 0.56, S 0.11, ash 7.35", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"bagasse (Ghugare 2014)", "solid", kNotStated, 18.990e6, "dry fuel",
+                "mass % dry: C 48.64, H 5.87, O 42.82, N 0.16, S 0.04, ash 2.47", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"miscanthus (Ghugare 2014)", "solid", kNotStated, 19.400e6, "dry fuel",
+                "mass % dry: C 49, H 6, O 43.8, N 0.6, S 0.1, ash 0.5", "", kGhugare, kSampleOnce},
+    TypicalFuel{"switchgrass (Ghugare 2014)", "solid", kNotStated, 18.256e6, "dry fuel",
+                "mass % dry: C 47.4, H 5.8, O 38.9, N 0.8, S 0.1, ash 7", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"waste, municipal solid (Ghugare 2014)", "solid", kNotStated, 19.879e6, "dry fuel",
+                "mass % dry: C 47.6, H 6, O 32.9, N 1.2, S 0.3, ash 12", "", kGhugare, kSampleOnce},
+    TypicalFuel{"waste, mixed paper (Ghugare 2014)", "solid", kNotStated, 17.611e6, "dry fuel",
+                "mass % dry: C 43.41, H 5.82, O 44.32, N 0.25, S 0.2, ash 6", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"waste, garden (Ghugare 2014)", "solid", kNotStated, 16.300e6, "dry fuel",
+                "mass % dry: C 41.54, H 4.79, O 31.91, N 0.85, S 0.24, ash 20.67", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"sewage sludge (Ghugare 2014)", "solid", kNotStated, 14.800e6, "dry fuel",
+                "mass % dry: C 33.4, H 4.65, O 19.6, N 4.52, S 1.67, ash 36.16", "", kGhugare,
+                kSampleOnce},
+    TypicalFuel{"uranium in a light water reactor, burn-up (ENS)", "nuclear", kNotStated,
+                kNotStated, "", "",
+                "burn-up at discharge 45 to 50 MWd per kg of uranium, 3.89 to 4.32 TJ/kg",
+                "European Nuclear Society, encyclopaedia, entry burn-up", kTypicalAgree},
+    TypicalFuel{"uranium, 3.5 % enriched, in a light water reactor (WNA)", "nuclear", kNotStated,
+                kNotStated, "", "", "3900 GJ/kg, 45 MWd/kg",
+                "World Nuclear Association, heat values of various fuels", kTypicalMemory},
+    TypicalFuel{"uranium, natural, in a light water reactor (WNA)", "nuclear", kNotStated,
+                kNotStated, "", "", "500 GJ/kg",
+                "World Nuclear Association, heat values of various fuels", kTypicalMemory},
+    TypicalFuel{"uranium, natural, in a fast reactor (WNA)", "nuclear", kNotStated, kNotStated, "",
+                "", "28000 GJ/kg", "World Nuclear Association, heat values of various fuels",
+                kTypicalMemory},
+};
+
+}  // namespace busbar::fuel::library::tables

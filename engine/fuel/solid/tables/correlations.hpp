@@ -1,0 +1,156 @@
+// Coefficients of the heating value correlations, as published. Order of the parts: C, H, O, N, S,
+// Cl, ash, moisture, volatile matter, fixed carbon.
+#pragma once
+
+#include <array>
+
+#include "fuel/solid/correlations.hpp"
+
+namespace busbar::fuel::solid::tables {
+
+inline constexpr std::string_view kAgree = "two transcriptions agree";
+inline constexpr std::string_view kOnce = "one transcription";
+inline constexpr std::string_view kMemory = "from memory: check before use";
+
+// International Table calorie, 4.1868 J.
+inline constexpr double kKilocalorie = 4186.8;
+
+inline constexpr std::array kChanniwalaParikh{
+    PartRange{Part::carbon, 0, 92.25},  PartRange{Part::hydrogen, 0.43, 25.15},
+    PartRange{Part::oxygen, 0, 50},     PartRange{Part::nitrogen, 0, 5.6},
+    PartRange{Part::sulphur, 0, 94.08}, PartRange{Part::ash, 0, 71.4}};
+inline constexpr std::array kDulong{PartRange{Part::oxygen, 0, 10}};
+inline constexpr std::array kFriedl{PartRange{Part::carbon, 35.2, 53.0},
+                                    PartRange{Part::hydrogen, 4.6, 7.0}};
+inline constexpr std::array kParikh{PartRange{Part::fixed_carbon, 1.0, 91.5},
+                                    PartRange{Part::volatile_matter, 0.92, 90.6},
+                                    PartRange{Part::ash, 0.12, 77.7}};
+
+inline constexpr std::array kCorrelations{
+    Correlation{"Channiwala-Parikh",
+                Terms::linear,
+                false,
+                1e6,
+                {0.3491, 1.1783, -0.1034, -0.0151, 0.1005, 0, -0.0211},
+                kChanniwalaParikh,
+                true,
+                true,
+                true,
+                "average absolute error 1.45 %, bias 0.00 %",
+                "Channiwala and Parikh, Fuel 81 (2002) 1051-1063",
+                kAgree},
+    // 1.443 (H - O/8): -0.180375 per percent of oxygen.
+    Correlation{"Dulong",
+                Terms::linear,
+                false,
+                1e6,
+                {0.3383, 1.443, -0.180375, 0, 0.0942},
+                kDulong,
+                true,
+                false,
+                false,
+                "for coal with less than 10 % oxygen; 10 % too low on average for biomass",
+                "Dulong, as tabulated by Channiwala and Parikh, Fuel 81 (2002) 1051-1063",
+                kAgree},
+    Correlation{
+        "Boie",
+        Terms::linear,
+        false,
+        1e6,
+        {0.3516, 1.16225, -0.1109, 0.0628, 0.10465},
+        {},
+        true,
+        true,
+        true,
+        "about 5 % average absolute error on 536 samples of biomass",
+        "Boie, Energietechnik 3 (1953) 309; Channiwala and Parikh, Fuel 81 (2002) 1051-1063",
+        kOnce},
+    Correlation{"IGT",
+                Terms::linear,
+                false,
+                1e6,
+                {0.341, 1.322, -0.12, -0.12, 0.0686, 0, -0.0153},
+                {},
+                true,
+                true,
+                false,
+                "not stated",
+                "Institute of Gas Technology, Coal Conversion Systems Technical Data Book (1978)",
+                kMemory},
+    Correlation{"Grummel-Davis",
+                Terms::grummel_davis,
+                false,
+                1e6,
+                {},
+                {},
+                true,
+                false,
+                false,
+                "not stated",
+                "Grummel and Davis, Fuel 12 (1933) 199; Channiwala and Parikh, Fuel 81 (2002) "
+                "1051-1063",
+                kMemory},
+    Correlation{"Vondracek",
+                Terms::vondracek,
+                false,
+                kKilocalorie,
+                {},
+                {},
+                true,
+                false,
+                false,
+                "not stated",
+                "Vondracek (1927); Channiwala and Parikh, Fuel 81 (2002) 1051-1063",
+                kMemory},
+    Correlation{"Friedl",
+                Terms::friedl,
+                false,
+                1e3,
+                {},
+                kFriedl,
+                false,
+                true,
+                false,
+                "standard error of calibration 337 kJ/kg, R2 0.943",
+                "Friedl, Padouvas, Rotter and Varmuza, Analytica Chimica Acta 544 (2005) 191, mean "
+                "of the OLS and PLS models",
+                kMemory},
+    Correlation{"Sheng-Azevedo",
+                Terms::sheng_azevedo,
+                false,
+                1e6,
+                {},
+                {},
+                false,
+                true,
+                false,
+                "90 % of estimates within 5 %",
+                "Sheng and Azevedo, Biomass and Bioenergy 28 (2005) 499",
+                kMemory},
+    Correlation{"Parikh proximate",
+                Terms::linear,
+                true,
+                1e6,
+                {0, 0, 0, 0, 0, 0, -0.0078, 0, 0.1559, 0.3536},
+                kParikh,
+                true,
+                true,
+                true,
+                "average absolute error 3.74 %, bias 0.12 %",
+                "Parikh, Channiwala and Ghosal, Fuel 84 (2005) 487",
+                kOnce},
+    Correlation{"Cordero proximate",
+                Terms::linear,
+                true,
+                1e6,
+                {0, 0, 0, 0, 0, 0, 0, 0, 0.1708, 0.3543},
+                {},
+                false,
+                true,
+                false,
+                "not stated; for lignocellulosic matter and its chars",
+                "Cordero et al., Fuel 80 (2001) 1567",
+                kOnce},
+};
+
+}  // namespace busbar::fuel::solid::tables
