@@ -21,6 +21,8 @@ std::span<const Row> steam_properties();
 std::span<const Row> steam_transport();
 std::span<const Row> steam_pairs();
 std::span<const Row> stream_properties();
+std::span<const Row> fuel_moisture();
+std::span<const Row> fuel_library();
 
 /// All rows in the order of the chapters above.
 std::span<const Row* const> all();

@@ -108,6 +108,7 @@ Outcome<Analysis> in_state(const Analysis& analysis, State to, const Supplement&
 }
 
 Outcome<double> factor(State from, State to, const Dilution& dilution) {
+  if (from == to) return 1.0;
   const Outcome<double> before = dry_part(from, dilution);
   if (!before) return before;
   const Outcome<double> after = dry_part(to, dilution);

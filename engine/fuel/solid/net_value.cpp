@@ -111,7 +111,7 @@ const NetMethod* net_method_named(std::string_view name) {
   return nullptr;
 }
 
-Outcome<double> net_from_gross(const Analysis& analysis, HeatingValue gross, State to,
+Outcome<double> net_from_gross(const Analysis& analysis, StatedValue gross, State to,
                                const NetMethod& method, std::optional<double> moisture) {
   const Outcome<Basis> basis = basis_of(analysis, gross.state, to, moisture);
   if (!basis) return basis.failure();
@@ -121,7 +121,7 @@ Outcome<double> net_from_gross(const Analysis& analysis, HeatingValue gross, Sta
          method.moisture * basis->moisture_wanted;
 }
 
-Outcome<double> gross_from_net(const Analysis& analysis, HeatingValue net, State to,
+Outcome<double> gross_from_net(const Analysis& analysis, StatedValue net, State to,
                                const NetMethod& method, std::optional<double> moisture) {
   const Outcome<Basis> basis = basis_of(analysis, net.state, to, moisture);
   if (!basis) return basis.failure();

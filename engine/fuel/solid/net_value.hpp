@@ -32,7 +32,7 @@ inline constexpr const char* kUnknownNetMethod =
     "volume\", \"IPCC 2006\" or \"heat of condensation\"";
 
 /// A heating value and the state of the fuel that it is per kilogram of.
-struct HeatingValue {
+struct StatedValue {
   double value = 0;
   State state = State::dry;
 };
@@ -40,11 +40,11 @@ struct HeatingValue {
 /// Net value in state `to` from a gross value. `moisture` is that of the moist state among the
 /// wanted and the given one that the analysis does not hold itself. Failures: 1 the analysis (it
 /// holds no elements), 3 the state of the gross value, 4 the wanted state, 5 the moisture.
-Outcome<double> net_from_gross(const Analysis& analysis, HeatingValue gross, State to,
+Outcome<double> net_from_gross(const Analysis& analysis, StatedValue gross, State to,
                                const NetMethod& method, std::optional<double> moisture);
 
 /// The other way round, with the same failures.
-Outcome<double> gross_from_net(const Analysis& analysis, HeatingValue net, State to,
+Outcome<double> gross_from_net(const Analysis& analysis, StatedValue net, State to,
                                const NetMethod& method, std::optional<double> moisture);
 
 /// Net value at another moisture; both moistures as fractions of moist mass, below one.
