@@ -17,6 +17,7 @@ std::span<const Row> limits();
 std::span<const Row> performance();
 std::span<const Row> units();
 std::span<const Row> explanation();
+std::span<const Row> boiler_losses();
 std::span<const Row> steam_properties();
 std::span<const Row> steam_transport();
 std::span<const Row> steam_pairs();
