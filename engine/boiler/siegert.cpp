@@ -35,7 +35,7 @@ Outcome<SiegertCoefficients> at_moisture(std::span<const SiegertCoefficients> ro
                                          double moisture) {
   if (rows.front().moisture < 0) {
     if (!std::isnan(moisture)) {
-      return Failure{Fault::wrong_kind, 5,
+      return Failure{Fault::outside_range, 5,
                      "is given, but the source prints this fuel without a water content; leave "
                      "it out"};
     }

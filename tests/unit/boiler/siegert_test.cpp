@@ -47,7 +47,7 @@ TEST(Siegert, OxygenAndCarbonDioxideAgreeAtStoichiometricGas) {
 TEST(Siegert, RefusesWhatItCannotKnow) {
   EXPECT_EQ(siegert_loss("peat", 433, 293, 0.03, kNone).failure().argument, 1);
   EXPECT_EQ(siegert_loss("biomass", 433, 293, 0.03, kNone).failure().fault, Fault::missing);
-  EXPECT_EQ(siegert_loss("propane", 433, 293, 0.03, 0.1).failure().fault, Fault::wrong_kind);
+  EXPECT_EQ(siegert_loss("propane", 433, 293, 0.03, 0.1).failure().fault, Fault::outside_range);
   EXPECT_EQ(siegert_loss("biomass", 433, 293, 0.03, 0.51).failure().fault, Fault::outside_range);
   EXPECT_EQ(siegert_loss("propane", 283, 293, 0.03, kNone).failure().argument, 2);
   EXPECT_EQ(siegert_loss("hard coal, simple", 433, 293, 0.03, kNone).failure().argument, 1);
