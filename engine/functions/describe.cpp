@@ -21,6 +21,13 @@ constexpr double kMost = 2273.15;
 
 }  // namespace
 
+std::string heading(std::string_view name, Quantity quantity, UnitSet units) {
+  std::string text(name);
+  text += ", ";
+  text += unit_of(units, quantity).symbol;
+  return text;
+}
+
 void append_validity(std::string& text, UnitSet units) {
   text += " IAPWS-IF97 holds from ";
   append_measure(text, {kLeast, Quantity::temperature}, units);

@@ -2,6 +2,7 @@
 #pragma once
 
 #include <string>
+#include <string_view>
 
 #include "catalogue/row.hpp"
 #include "water/state.hpp"
@@ -14,6 +15,9 @@ void describe_stream(std::string& text, const Stream& stream, UnitSet units);
 
 /// Where IAPWS-IF97 holds.
 void append_validity(std::string& text, UnitSet units);
+
+/// Heading of a column: "pressure, bar".
+std::string heading(std::string_view name, Quantity quantity, UnitSet units);
 
 /// The failure of asking a single-phase state for its dryness: #N/A, with the distance from
 /// saturation. `argument` is that of the stream, or 0 where the state came from two numbers.

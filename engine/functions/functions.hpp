@@ -17,11 +17,11 @@ std::span<const Row> limits();
 std::span<const Row> performance();
 std::span<const Row> units();
 std::span<const Row> explanation();
-std::span<const Row> boiler_losses();
 std::span<const Row> steam_properties();
 std::span<const Row> steam_transport();
 std::span<const Row> steam_pairs();
 std::span<const Row> stream_properties();
+std::span<const Row> diagrams();
 std::span<const Row> fuel_moisture();
 std::span<const Row> fuel_library();
 

@@ -54,13 +54,6 @@ Outcome<Fraction> dryness_of(const Stream& stream) {
 
 // --- Table -----------------------------------------------------------------------------------
 
-std::string heading(std::string_view name, Quantity quantity, UnitSet units) {
-  std::string text(name);
-  text += ", ";
-  text += unit_of(units, quantity).symbol;
-  return text;
-}
-
 Outcome<Grid> stream_table(Streams streams, UnitSet units) {
   constexpr std::size_t kColumns = 8;
   Grid table(streams.size() + 1, kColumns);
