@@ -43,6 +43,14 @@ Failure too_many(std::size_t lines) {
             {static_cast<double>(kMostLines), Quantity::number}}}};
 }
 
+Failure wrong_count(std::size_t limits, std::size_t lines) {
+  return {Fault::wrong_shape,
+          0,
+          "holds {0} numbers for {1} lines: give one for all or one for each",
+          {{{static_cast<double>(limits), Quantity::number},
+            {static_cast<double>(lines), Quantity::number}}}};
+}
+
 // Headings, then the lines one below the other with an empty row between them, at which a chart
 // lifts its pen.
 Grid table_of(Axes axes, const std::vector<Points>& lines, UnitSet units) {
@@ -78,24 +86,38 @@ Grid table_of(Axes axes, const std::vector<Points>& lines, UnitSet units) {
   return table;
 }
 
-// One line for each number of a range.
-template <class Line>
-Outcome<Grid> lines_of(Word word, std::span<const double> constants, Number points, UnitSet units,
-                       const Line& line) {
-  constexpr std::uint8_t kConstants = 2;
+// One line for each number of a range; a limit is one number for all of them or one for each.
+struct Family {
+  std::span<const double> constants;
+  std::span<const double> from;
+  std::span<const double> to;
+};
+
+Failure check(const Family& family) {
+  if (family.constants.size() > kMostLines) return too_many(family.constants.size()).about(2);
+  for (const auto& [argument, limits] : {std::pair{3, family.from}, {4, family.to}}) {
+    if (limits.size() == 1 || limits.size() == family.constants.size()) continue;
+    return wrong_count(limits.size(), family.constants.size())
+        .about(static_cast<std::uint8_t>(argument));
+  }
+  return {};
+}
+
+using Line = Outcome<Points> (*)(Axes, double constant, double from, double to, std::size_t points);
+
+Outcome<Grid> lines_of(Word word, const Family& family, Number points, UnitSet units, Line line) {
   constexpr std::uint8_t kPoints = 5;
   const auto axes = water::diagram::axes_named(word);
   if (!axes) return kUnknownAxes;
-  if (const Failure failure = about_count(points, kPoints); failure.fault != Fault::none) {
-    return failure;
-  }
-  if (constants.size() > kMostLines) {
-    return too_many(constants.size()).about(kConstants);
+  for (const Failure& failure : {check(family), about_count(points, kPoints)}) {
+    if (failure.fault != Fault::none) return failure;
   }
   std::vector<Points> lines;
-  lines.reserve(constants.size());
-  for (const double constant : constants) {
-    Outcome<Points> drawn = line(*axes, constant);
+  lines.reserve(family.constants.size());
+  for (std::size_t i = 0; i < family.constants.size(); ++i) {
+    const double from = family.from[family.from.size() > 1 ? i : 0];
+    const double to = family.to[family.to.size() > 1 ? i : 0];
+    Outcome<Points> drawn = line(*axes, family.constants[i], from, to, count_of(points));
     if (!drawn) return drawn.failure();
     lines.push_back(std::move(*drawn));
   }
@@ -113,25 +135,10 @@ Outcome<Grid> saturation_dome(Word word, Number points, UnitSet units) {
   return table_of(*axes, {*line}, units);
 }
 
-Outcome<Grid> isobars(Word axes, Numbers<Pressure> pressures, Temperature from, Temperature to,
-                      Number points, UnitSet units) {
-  return lines_of(axes, pressures.si, points, units, [&](Axes on, double pressure) {
-    return water::diagram::isobar(on, pressure, from.si, to.si, count_of(points));
-  });
-}
-
-Outcome<Grid> isotherms(Word axes, Numbers<Temperature> temperatures, Pressure from, Pressure to,
-                        Number points, UnitSet units) {
-  return lines_of(axes, temperatures.si, points, units, [&](Axes on, double temperature) {
-    return water::diagram::isotherm(on, temperature, from.si, to.si, count_of(points));
-  });
-}
-
-Outcome<Grid> dryness_lines(Word axes, Numbers<Fraction> drynesses, Temperature from,
-                            Temperature to, Number points, UnitSet units) {
-  return lines_of(axes, drynesses.si, points, units, [&](Axes on, double dryness) {
-    return water::diagram::dryness_line(on, dryness, from.si, to.si, count_of(points));
-  });
+template <class Constant, class Limit, Line kLine>
+Outcome<Grid> family_of_lines(Word axes, Numbers<Constant> constants, Numbers<Limit> from,
+                              Numbers<Limit> to, Number points, UnitSet units) {
+  return lines_of(axes, {constants.si, from.si, to.si}, points, units, kLine);
 }
 
 // --- Lines of a process ----------------------------------------------------------------------
@@ -171,9 +178,11 @@ constexpr Argument kAxes{"axes",
                          "for a chart whose axis is set to logarithmic"};
 constexpr Argument kPoints{"points", "Number of points of each line, ends and corners included",
                            kFewestPoints, kMostPoints};
-constexpr Argument kFromTemperature{"from temperature", "Where each line begins", 273.15, 2273.15,
-                                    kIf97Limit};
-constexpr Argument kToTemperature{"to temperature", "Where each line ends; above the first", 273.15,
+constexpr Argument kFromTemperature{"from temperature",
+                                    "Where each line begins: one for all or one for each", 273.15,
+                                    2273.15, kIf97Limit};
+constexpr Argument kToTemperature{"to temperature",
+                                  "Where each line ends: one for all or one for each", 273.15,
                                   2273.15, kIf97Limit};
 constexpr const char* kSaturationLimit = "where the saturation line of IAPWS-IF97 ends";
 
@@ -187,29 +196,36 @@ constexpr Argument kIsobars[] = {
 constexpr Argument kIsotherms[] = {
     kAxes,
     {"temperatures", "Temperatures, one for each line", 273.15, 2273.15, kIf97Limit},
-    {"from pressure", "Absolute pressure where each line begins", kAboveZero, 100e6, kIf97Limit},
-    {"to pressure", "Absolute pressure where each line ends; above the first", kAboveZero, 100e6,
-     kIf97Limit},
+    {"from pressure", "Absolute pressure where each line begins: one for all or one for each",
+     kAboveZero, 100e6, kIf97Limit},
+    {"to pressure", "Absolute pressure where each line ends: one for all or one for each",
+     kAboveZero, 100e6, kIf97Limit},
     kPoints};
 constexpr Argument kDrynessLines[] = {
     kAxes,
     {"drynesses", "Mass of vapour over mass of fluid, one for each line", 0, 1},
-    {"from temperature", "Saturation temperature where each line begins", 273.15,
+    {"from temperature",
+     "Saturation temperature where each line begins: one for all or one for each", 273.15,
      water::kCriticalTemperature, kSaturationLimit},
-    {"to temperature", "Saturation temperature where each line ends; above the first", 273.15,
-     water::kCriticalTemperature, kSaturationLimit},
+    {"to temperature", "Saturation temperature where each line ends: one for all or one for each",
+     273.15, water::kCriticalTemperature, kSaturationLimit},
     kPoints};
 constexpr Argument kProcess[] = {
     kAxes, {"streams", "A range whose cells all hold streams, in the order of the flow"}, kPoints};
 
 constexpr const char* kTable =
-    "A table of 5 columns: abscissa, ordinate, pressure, temperature, dryness (empty where there "
-    "is "
-    "none); headings in row 1";
-constexpr const char* kLinesNote =
-    "Enter it as an array formula: one heading row, then the points of each line with one empty "
-    "row between two lines. One series of an XY chart draws them all: it lifts its pen at the "
-    "empty rows. ";
+    "A table for an array formula of 5 columns: abscissa, ordinate, pressure, temperature, dryness "
+    "(empty where there is none). Headings stand in row 1; an empty row parts two lines, and there "
+    "one series of an XY chart lifts its pen";
+constexpr const char* kIsobarNote =
+    "By rising enthalpy. A line that begins at the saturation temperature begins at boiling water; "
+    "one that ends there ends at boiling water.";
+constexpr const char* kIsothermNote =
+    "By rising pressure. A line passes through wet steam where its pressures lie on both sides of "
+    "saturation; one that ends at the saturation pressure ends in saturated steam, as the lines of "
+    "an h-s diagram do.";
+constexpr const char* kDrynessNote =
+    "373.946 °C as the end is the critical point, in which all these lines meet.";
 constexpr Source kExpansionSource{"Moran and Shapiro, Fundamentals of Engineering Thermodynamics",
                                   "5th ed.",
                                   "section 6.8, isentropic turbine efficiency, held constant from "
@@ -226,19 +242,20 @@ constexpr Words words(const char* name, const char* summary, const char* notes,
 constexpr Row kRows[] = {
     row<saturation_dome>(
         words("SATURATION_DOME", "Points of the saturation line for a chart",
-              "Boiling water from 0 °C to the critical point, then saturated steam back to 0 °C. "
-              "Enter it as an array formula of one row more than there are points.",
+              "Boiling water from 0 °C to the critical point, then saturated steam back to 0 °C.",
+
               kSaturation, {"INDEX(SATURATION_DOME(\"h-s\"; 60); 2; 1)", "-0.00015454959"}),
         kDome, explain_size),
-    row<isobars>(words("ISOBARS", "Points of lines of constant pressure for a chart", kLinesNote,
-                       kSteamTables, {"INDEX(ISOBARS(\"h-s\"; 1; 20; 600; 40); 41; 2)", "3705.57"}),
-                 kIsobars, explain_size),
-    row<isotherms>(
-        words("ISOTHERMS", "Points of lines of constant temperature for a chart", kLinesNote,
+    row<family_of_lines<Pressure, Temperature, water::diagram::isobar>>(
+        words("ISOBARS", "Points of lines of constant pressure for a chart", kIsobarNote,
+              kSteamTables, {"INDEX(ISOBARS(\"h-s\"; 1; 20; 600; 40); 41; 2)", "3705.57"}),
+        kIsobars, explain_size),
+    row<family_of_lines<Temperature, Pressure, water::diagram::isotherm>>(
+        words("ISOTHERMS", "Points of lines of constant temperature for a chart", kIsothermNote,
               kSteamTables, {"INDEX(ISOTHERMS(\"h-s\"; 600; 0.01; 100; 30); 31; 2)", "3625.84"}),
         kIsotherms, explain_size),
-    row<dryness_lines>(
-        words("DRYNESS_LINES", "Points of lines of constant dryness for a chart", kLinesNote,
+    row<family_of_lines<Fraction, Temperature, water::diagram::dryness_line>>(
+        words("DRYNESS_LINES", "Points of lines of constant dryness for a chart", kDrynessNote,
               kSaturation,
               {"INDEX(DRYNESS_LINES(\"h-s\"; 0.9; 0; 373.946; 30); 31; 2)", "2087.55"}),
         kDrynessLines, explain_size),

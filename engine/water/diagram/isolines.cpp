@@ -84,16 +84,16 @@ Outcome<Points> isotherm(Axes axes, double temperature, double from, double to,
     const Outcome<State> boiling = at_temperature_dryness(temperature, 0);
     if (!boiling) return boiling.failure().about(2);
     const double saturation = dry->pressure;
-    if (from < saturation * (1 - kSame) && to >= saturation) {
+    if (from < saturation * (1 - kSame) && to >= saturation * (1 - kSame)) {
       begins = std::log(saturation);
       course.push_back({std::log(from), begins, begin, *dry, in_one_phase});
+      // What ends at saturation ends in saturated steam.
+      if (to <= saturation * (1 + kSame)) return points_of(course, axes, points, 5, 2);
       if (dry->enthalpy > boiling->enthalpy) course.push_back({1, 0, *dry, *boiling, wet, true});
       begin = *boiling;
     }
   }
-  if (to > begin.pressure * (1 + kSame)) {
-    course.push_back({begins, std::log(to), begin, *last, in_one_phase});
-  }
+  course.push_back({begins, std::log(to), begin, *last, in_one_phase});
   return points_of(course, axes, points, 5, 2);
 }
 

@@ -22,7 +22,8 @@ Outcome<Points> saturation_dome(Axes axes, std::size_t points);
 /// From one temperature to a higher one (K) at a pressure (Pa), by rising enthalpy.
 Outcome<Points> isobar(Axes axes, double pressure, double from, double to, std::size_t points);
 
-/// From one pressure to a higher one (Pa) at a temperature (K).
+/// From one pressure to a higher one (Pa) at a temperature (K). A line that ends at the saturation
+/// pressure ends in saturated steam; it goes on through wet steam where it ends above.
 Outcome<Points> isotherm(Axes axes, double temperature, double from, double to, std::size_t points);
 
 /// From one saturation temperature to a higher one (K) at a dryness.

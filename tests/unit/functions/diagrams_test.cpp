@@ -27,6 +27,17 @@ TEST(Diagrams, OneHeadingRowAndAnEmptyRowBetweenLines) {
   }
 }
 
+TEST(Diagrams, EachLineMayHaveItsOwnLimits) {
+  const Value table = evaluate("ISOTHERMS(\"h-s\"; {100 | 200}; 0.01; {1 | 10}; 12)");
+  ASSERT_EQ(table.rows(), 26U);
+  EXPECT_NEAR(table.number_at(12, 2), 1, 1e-12);
+  EXPECT_NEAR(table.number_at(25, 2), 10, 1e-12);
+  EXPECT_EQ(evaluate("ISOTHERMS(\"h-s\"; {100 | 200}; 0.01; {1 | 2 | 3}; 12)").reason(),
+            "ISOTHERMS: to pressure holds 3 numbers for 2 lines: give one for all or one for each");
+  const Value dry = evaluate("ISOTHERMS(\"h-s\"; 150; 0.01; SATURATION_PRESSURE(150); 12)");
+  EXPECT_EQ(dry.number_at(12, 4), 1);
+}
+
 TEST(Diagrams, TheUnitSetIsThatOfTheCall) {
   const Value us = evaluate("ISOTHERMS(\"T-s\"; 1000; 1; 500; 10; \"us\")");
   EXPECT_EQ(us.text_at(0, 0), "entropy, Btu/(lb °F)");

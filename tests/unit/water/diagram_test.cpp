@@ -170,6 +170,16 @@ TEST(Diagram, IsothermsKeepTheirTemperatureAndTurnAtTheDome) {
   }
 }
 
+TEST(Diagram, IsothermsUpToSaturationEndInSaturatedSteam) {
+  for (const double t : {300.0, 450.0, 640.0, kCriticalTemperature}) {
+    const auto line = isotherm(Axes::enthalpy_entropy, t, 500, *saturation_pressure(t), 20);
+    ASSERT_TRUE(line);
+    ASSERT_EQ(line->size(), 20U);
+    EXPECT_TRUE(same_state(line->back(), *at_temperature_dryness(t, 1)));
+    EXPECT_NE((*line)[18].region, Region::two_phase);
+  }
+}
+
 TEST(Diagram, DrynessLinesKeepTheirDryness) {
   for (const Axes axes : kAllAxes) {
     for (const double x : {0.0, 0.1, 0.5, 0.85, 0.99, 1.0}) {
