@@ -4,9 +4,15 @@
 #include <cstdio>
 #include <map>
 
+#include "water/batch/instructions.hpp"
+
 namespace busbar::bench {
 
 namespace {
+
+using water::batch::Instructions;
+using water::batch::instructions;
+using water::batch::use_at_most;
 
 void each(benchmark::State& state, const Pairs& in, Single function) {
   for (auto _ : state) {
@@ -83,6 +89,13 @@ int run(int argc, char** argv, const std::vector<Job>& jobs) {
   for (std::string& text : texts) flags.push_back(text.data());
   int count = static_cast<int>(flags.size());
   benchmark::Initialize(&count, flags.data());
+  for (int i = 1; i < count; ++i) {
+    const std::string flag = flags[static_cast<std::size_t>(i)];
+    if (flag == "baseline") use_at_most(Instructions::baseline);
+    if (flag == "avx2") use_at_most(Instructions::avx2);
+  }
+  constexpr const char* kNames[] = {"baseline", "AVX2", "AVX-512"};
+  std::printf("batch kernels: %s\n", kNames[static_cast<std::size_t>(instructions())]);
   for (const Job& job : jobs) {
     const std::string name = job.name;
     if (job.yardstick != nullptr) {

@@ -26,7 +26,8 @@ struct Job {
   double batch_nanoseconds = 0;
 };
 
-/// Runs all jobs and prints one table. The arguments are those of Google Benchmark.
+/// Runs all jobs and prints one table. The arguments are those of Google Benchmark, and `avx2` or
+/// `baseline` for batch kernels of no better instruction set than that.
 int run(int argc, char** argv, const std::vector<Job>& jobs);
 
 }  // namespace busbar::bench

@@ -1,5 +1,6 @@
 // What the water and steam kernels cost beside a plain transcription of the release.
 #include "ratios.hpp"
+#include "water/batch/pressure_temperature.hpp"
 #include "water/state.hpp"
 #include "yardstick.hpp"
 
@@ -46,6 +47,15 @@ double scalar_density(double p, double t) {
   return 1 / water::at_pressure_temperature(p, t)->volume;
 }
 
+template <water::batch::AtPressureTemperature kBatch>
+void columns(const Pairs& in, std::vector<double>& out) {
+  kBatch(in.first.data(), in.second.data(), out.data(), kStates);
+}
+void columns_vhs(const Pairs& in, std::vector<double>& out) {
+  water::batch::volume_enthalpy_entropy(in.first.data(), in.second.data(), out.data(),
+                                        out.data() + kStates, out.data() + 2 * kStates, kStates);
+}
+
 Pairs on_saturation_line() {
   Draw draw;
   Pairs pairs;
@@ -64,15 +74,15 @@ int main(int argc, char** argv) {
   const Pairs ps = pressures_and(&State::entropy, kSheetWithWet);
   const Pairs saturation = on_saturation_line();
   const std::vector<Job> jobs{
-      {"(p,t)->h, sheet", &sheet, yardstick::enthalpy, at_pt<&State::enthalpy>, nullptr, 20, 60,
-       15},
-      {"(p,t)->h, region 1", &liquid, yardstick::enthalpy, at_pt<&State::enthalpy>, nullptr, 0, 0,
-       8},
-      {"(p,t)->h, region 2", &vapour, yardstick::enthalpy, at_pt<&State::enthalpy>, nullptr, 0, 0,
-       8},
-      {"(p,t)->v,h,s, sheet", &sheet, plain_vhs, scalar_vhs, nullptr, 0, 100},
-      {"(p,t)->density, region 3", &supercritical, yardstick::density_3, scalar_density, nullptr, 0,
-       0, 50},
+      {"(p,t)->h, sheet", &sheet, yardstick::enthalpy, at_pt<&State::enthalpy>,
+       columns<water::batch::enthalpy>, 20, 60, 15},
+      {"(p,t)->h, region 1", &liquid, yardstick::enthalpy, at_pt<&State::enthalpy>,
+       columns<water::batch::enthalpy>, 0, 0, 8},
+      {"(p,t)->h, region 2", &vapour, yardstick::enthalpy, at_pt<&State::enthalpy>,
+       columns<water::batch::enthalpy>, 0, 0, 8},
+      {"(p,t)->v,h,s, sheet", &sheet, plain_vhs, scalar_vhs, columns_vhs, 0, 100},
+      {"(p,t)->density, region 3", &supercritical, yardstick::density_3, scalar_density,
+       columns<water::batch::density_3>, 0, 0, 50},
       {"(p,h)->t, sheet", &ph, yardstick::temperature_at_enthalpy, at_ph<&State::temperature>,
        nullptr, 30, 100},
       {"(p,h)->t,s, sheet", &ph, plain_ts, scalar_ts, nullptr, 0, 0, 35},

@@ -2,6 +2,7 @@
 
 #include "water/backward/volume.hpp"
 #include "water/constants.hpp"
+#include "water/equations/logarithm.hpp"
 #include "water/equations/series.hpp"
 #include "water/tables/backward_pt_3_a_to_f.hpp"
 #include "water/tables/backward_pt_3_boundaries.hpp"
@@ -11,32 +12,11 @@
 
 namespace busbar::water::backward {
 
+#include "water/kernels/subregions.hpp"
+
 namespace {
 
-template <const auto& kTable>
-double sum(double x, double y) {
-  return series<kTable, kValue>(x, y).value;
-}
-
-double power_4(double x) {
-  const double square = x * x;
-  return square * square;
-}
-
-// Equation 1: powers of the pressure in MPa; equation 2: powers of its logarithm.
-template <const auto& kTable>
-double boundary(double pressure) {
-  return sum<kTable>(pressure * 1e-6, 1.0);
-}
-
-template <const auto& kTable>
-double logarithmic_boundary(double pressure) {
-  return sum<kTable>(std::log(pressure * 1e-6), 1.0);
-}
-
 // Limits of pressure of SR5-05(2016), tables 2 and 10, Pa.
-constexpr double kPressure3cd = 19.00881189173929e6;         // footnote of table 2
-constexpr double kSaturationPressure643 = 21.04336732e6;     // section 5.1: psat(643.15 K)
 constexpr double kSaturationPressureLiquid = 21.93161551e6;  // footnote e: v' = 0.00264 m3/kg
 constexpr double kSaturationPressureVapour = 21.90096265e6;  // footnote f: v'' = 0.00385 m3/kg
 
@@ -60,25 +40,22 @@ Subregion3 near_critical(double p, double t, bool liquid) {
 }  // namespace
 
 double boundary_3ab_pt(double pressure) {
-  return logarithmic_boundary<tables::kBoundary3abPt>(pressure);
+  return logarithmic_boundary_of<tables::kBoundary3abPt>(pressure);
 }
-double boundary_3cd(double pressure) { return boundary<tables::kBoundary3cd>(pressure); }
-double boundary_3ef(double pressure) {
-  return tables::kBoundary3efSlope * (pressure * 1e-6 - kCriticalPressure * 1e-6) +
-         kCriticalTemperature;
-}
-double boundary_3gh(double pressure) { return boundary<tables::kBoundary3gh>(pressure); }
-double boundary_3ij(double pressure) { return boundary<tables::kBoundary3ij>(pressure); }
-double boundary_3jk(double pressure) { return boundary<tables::kBoundary3jk>(pressure); }
-double boundary_3mn(double pressure) { return boundary<tables::kBoundary3mn>(pressure); }
+double boundary_3cd(double pressure) { return boundary_of<tables::kBoundary3cd>(pressure); }
+double boundary_3ef(double pressure) { return boundary_3ef_at(pressure); }
+double boundary_3gh(double pressure) { return boundary_of<tables::kBoundary3gh>(pressure); }
+double boundary_3ij(double pressure) { return boundary_of<tables::kBoundary3ij>(pressure); }
+double boundary_3jk(double pressure) { return boundary_of<tables::kBoundary3jk>(pressure); }
+double boundary_3mn(double pressure) { return boundary_of<tables::kBoundary3mn>(pressure); }
 double boundary_3op(double pressure) {
-  return logarithmic_boundary<tables::kBoundary3op>(pressure);
+  return logarithmic_boundary_of<tables::kBoundary3op>(pressure);
 }
-double boundary_3qu(double pressure) { return boundary<tables::kBoundary3qu>(pressure); }
-double boundary_3rx(double pressure) { return boundary<tables::kBoundary3rx>(pressure); }
-double boundary_3uv(double pressure) { return boundary<tables::kBoundary3uv>(pressure); }
+double boundary_3qu(double pressure) { return boundary_of<tables::kBoundary3qu>(pressure); }
+double boundary_3rx(double pressure) { return boundary_of<tables::kBoundary3rx>(pressure); }
+double boundary_3uv(double pressure) { return boundary_of<tables::kBoundary3uv>(pressure); }
 double boundary_3wx(double pressure) {
-  return logarithmic_boundary<tables::kBoundary3wx>(pressure);
+  return logarithmic_boundary_of<tables::kBoundary3wx>(pressure);
 }
 
 Subregion3 subregion_3(double pressure, double temperature, bool liquid) {
@@ -109,77 +86,61 @@ Subregion3 subregion_3(double pressure, double temperature, bool liquid) {
   return Subregion3::t;
 }
 
-// The reducing quantities and exponents of tables 4 and 12 of SR5-05(2016) stand in the cases.
 double volume_pt_3(Subregion3 subregion, double pressure, double temperature) {
   switch (subregion) {
     case Subregion3::a:
-      return 0.0024 * sum<tables::kVolumePt3a>(pressure / 100e6 - 0.085, temperature / 760 - 0.817);
+      return volume_3a_at(pressure, temperature);
     case Subregion3::b:
-      return 0.0041 * sum<tables::kVolumePt3b>(pressure / 100e6 - 0.280, temperature / 860 - 0.779);
+      return volume_3b_at(pressure, temperature);
     case Subregion3::c:
-      return 0.0022 * sum<tables::kVolumePt3c>(pressure / 40e6 - 0.259, temperature / 690 - 0.903);
+      return volume_3c_at(pressure, temperature);
     case Subregion3::d:
-      return 0.0029 *
-             power_4(sum<tables::kVolumePt3d>(pressure / 40e6 - 0.559, temperature / 690 - 0.939));
+      return volume_3d_at(pressure, temperature);
     case Subregion3::e:
-      return 0.0032 * sum<tables::kVolumePt3e>(pressure / 40e6 - 0.587, temperature / 710 - 0.918);
+      return volume_3e_at(pressure, temperature);
     case Subregion3::f:
-      return 0.0064 * power_4(sum<tables::kVolumePt3f>(std::sqrt(pressure / 40e6 - 0.587),
-                                                       temperature / 730 - 0.891));
+      return volume_3f_at(pressure, temperature);
     case Subregion3::g:
-      return 0.0027 *
-             power_4(sum<tables::kVolumePt3g>(pressure / 25e6 - 0.872, temperature / 660 - 0.971));
+      return volume_3g_at(pressure, temperature);
     case Subregion3::h:
-      return 0.0032 *
-             power_4(sum<tables::kVolumePt3h>(pressure / 25e6 - 0.898, temperature / 660 - 0.983));
+      return volume_3h_at(pressure, temperature);
     case Subregion3::i:
-      return 0.0041 * power_4(sum<tables::kVolumePt3i>(std::sqrt(pressure / 25e6 - 0.910),
-                                                       temperature / 660 - 0.984));
+      return volume_3i_at(pressure, temperature);
     case Subregion3::j:
-      return 0.0054 * power_4(sum<tables::kVolumePt3j>(std::sqrt(pressure / 25e6 - 0.875),
-                                                       temperature / 670 - 0.964));
+      return volume_3j_at(pressure, temperature);
     case Subregion3::k:
-      return 0.0077 * sum<tables::kVolumePt3k>(pressure / 25e6 - 0.802, temperature / 680 - 0.935);
+      return volume_3k_at(pressure, temperature);
     case Subregion3::l:
-      return 0.0026 *
-             power_4(sum<tables::kVolumePt3l>(pressure / 24e6 - 0.908, temperature / 650 - 0.989));
+      return volume_3l_at(pressure, temperature);
     case Subregion3::m:
-      return 0.0028 * sum<tables::kVolumePt3m>(pressure / 23e6 - 1.00,
-                                               std::sqrt(std::sqrt(temperature / 650 - 0.997)));
+      return volume_3m_at(pressure, temperature);
     case Subregion3::n:
-      return 0.0031 *
-             std::exp(sum<tables::kVolumePt3n>(pressure / 23e6 - 0.976, temperature / 650 - 0.997));
+      return 0.0031 * std::exp(sum_of<tables::kVolumePt3n>(pressure / 23e6 - 0.976,
+                                                           temperature / 650 - 0.997));
     case Subregion3::o:
-      return 0.0034 * sum<tables::kVolumePt3o>(std::sqrt(pressure / 23e6 - 0.974),
-                                               temperature / 650 - 0.996);
+      return volume_3o_at(pressure, temperature);
     case Subregion3::p:
-      return 0.0041 * sum<tables::kVolumePt3p>(std::sqrt(pressure / 23e6 - 0.972),
-                                               temperature / 650 - 0.997);
+      return volume_3p_at(pressure, temperature);
     case Subregion3::q:
-      return 0.0022 *
-             power_4(sum<tables::kVolumePt3q>(pressure / 23e6 - 0.848, temperature / 650 - 0.983));
+      return volume_3q_at(pressure, temperature);
     case Subregion3::r:
-      return 0.0054 * sum<tables::kVolumePt3r>(pressure / 23e6 - 0.874, temperature / 650 - 0.982);
+      return volume_3r_at(pressure, temperature);
     case Subregion3::s:
-      return 0.0022 *
-             power_4(sum<tables::kVolumePt3s>(pressure / 21e6 - 0.886, temperature / 640 - 0.990));
+      return volume_3s_at(pressure, temperature);
     case Subregion3::t:
-      return 0.0088 * sum<tables::kVolumePt3t>(pressure / 20e6 - 0.803, temperature / 650 - 1.02);
+      return volume_3t_at(pressure, temperature);
     case Subregion3::u:
-      return 0.0026 * sum<tables::kVolumePt3u>(pressure / 23e6 - 0.902, temperature / 650 - 0.988);
+      return volume_3u_at(pressure, temperature);
     case Subregion3::v:
-      return 0.0031 * sum<tables::kVolumePt3v>(pressure / 23e6 - 0.960, temperature / 650 - 0.995);
+      return volume_3v_at(pressure, temperature);
     case Subregion3::w:
-      return 0.0039 *
-             power_4(sum<tables::kVolumePt3w>(pressure / 23e6 - 0.959, temperature / 650 - 0.995));
+      return volume_3w_at(pressure, temperature);
     case Subregion3::x:
-      return 0.0049 * sum<tables::kVolumePt3x>(pressure / 23e6 - 0.910, temperature / 650 - 0.988);
+      return volume_3x_at(pressure, temperature);
     case Subregion3::y:
-      return 0.0031 *
-             power_4(sum<tables::kVolumePt3y>(pressure / 22e6 - 0.996, temperature / 650 - 0.994));
+      return volume_3y_at(pressure, temperature);
     case Subregion3::z:
-      return 0.0038 *
-             power_4(sum<tables::kVolumePt3z>(pressure / 22e6 - 0.993, temperature / 650 - 0.994));
+      return volume_3z_at(pressure, temperature);
   }
   return 0;
 }

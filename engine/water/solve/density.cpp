@@ -11,25 +11,13 @@ namespace busbar::water {
 
 namespace {
 
-// Equation 28 is used between these densities: 100 MPa at 623.15 K has 761 kg/m3, and the thinnest
-// vapour of region 3, at 16.53 MPa and 623.15 K, has 113 kg/m3.
-constexpr double kLowestDensity = 80;
-constexpr double kHighestDensity = 800;
+#include "water/kernels/density.hpp"
 
-struct Slope {
-  double pressure;     // Pa
-  double per_density;  // Pa m3/kg
-};
+using Slope = PressureSlope<double>;
 
 Slope pressure_at(double density, double temperature) {
-  const auto f =
-      Region3Equation::at<kX | kXX>(density / kCriticalDensity, kCriticalTemperature / temperature);
-  const double rt = kGasConstant * temperature;
-  return {density * rt * f.delta1, rt * (2 * f.delta1 + f.delta2)};
+  return pressure_slope_at(density, temperature);
 }
-
-// A relative step after which the next one is below rounding: Newton squares it.
-constexpr double kSmallStep = 1e-9;
 
 // Newton on a branch below Tc. On the liquid branch the pressure is a convex rising function of
 // density, on the vapour branch a concave one; once on the outer side of the root (above it for

@@ -15,12 +15,7 @@ Properties properties_5(double pressure, double temperature) {
 }
 
 Properties properties_3(double density, double temperature) {
-  const double delta = density / kCriticalDensity;
-  const double tau = kCriticalTemperature / temperature;
-  const auto f = Region3Equation::at<kValue | kX | kY>(delta, tau);
-  const double value = f.value + tables::kRegion3N1 * std::log(delta);
-  return {1 / density, kGasConstant * temperature * (f.tau1 + f.delta1),
-          kGasConstant * (f.tau1 - value)};
+  return helmholtz_properties_at<kAllOutputs>(density, temperature);
 }
 
 }  // namespace busbar::water

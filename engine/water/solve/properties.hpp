@@ -1,19 +1,15 @@
 // Volume, enthalpy and entropy from the basic equations, in SI.
 #pragma once
 
-#include <cmath>
-
 #include "water/equations/gibbs.hpp"
 #include "water/equations/helmholtz.hpp"
+#include "water/equations/logarithm.hpp"
 
 namespace busbar::water {
 
-/// m3/kg, J/kg, J/(kg K).
-struct Properties {
-  double volume = 0;
-  double enthalpy = 0;
-  double entropy = 0;
-};
+#include "water/kernels/properties.hpp"
+
+using Properties = PropertiesOf<double>;
 
 /// `from` at weight 0, `to` at weight 1, both to the last bit, and linear in between.
 inline double mixed(double from, double to, double weight) {
@@ -26,19 +22,10 @@ inline Properties mixed(const Properties& from, const Properties& to, double wei
           mixed(from.entropy, to.entropy, weight)};
 }
 
-/// Properties at pressure (Pa) and temperature (K) by the equation of region 1, 2 or 5.
+/// All three at pressure (Pa) and temperature (K) by the equation of region 1, 2 or 5.
 template <class Equation>
 inline Properties gibbs_properties(double pressure, double temperature) {
-  const double pi = pressure / Equation::kReducingPressure;
-  const double tau = Equation::kReducingTemperature / temperature;
-  const Gibbs<double> g = Equation::template at<kValue | kX | kY>(pi, tau);
-  Properties out;
-  out.volume = kGasConstant * temperature / pressure * g.pi_pi1;
-  out.enthalpy = kGasConstant * Equation::kReducingTemperature * g.tau1;
-  double potential = g.g;
-  if constexpr (Equation::kHasLogarithm) potential += std::log(pi);
-  out.entropy = kGasConstant * (tau * g.tau1 - potential);
-  return out;
+  return gibbs_properties_at<Equation, kAllOutputs>(pressure, temperature);
 }
 
 // One copy of each (properties.cpp): a value at a boundary is the same number wherever it is asked
