@@ -2,8 +2,10 @@
 
 #include <algorithm>
 #include <cmath>
+#include <memory>
 
 #include "catalogue/arguments.hpp"
+#include "catalogue/columns.hpp"
 #include "catalogue/options.hpp"
 #include "catalogue/sentence.hpp"
 #include "core/text.hpp"
@@ -30,10 +32,11 @@ class Caller {
           error({{Fault::wrong_shape, 0, "gives a table and takes single cells only"}, {}}));
     }
     Grid out(shape_.rows, shape_.columns);
-    for (std::size_t r = 0; r < shape_.rows; ++r) {
-      for (std::size_t c = 0; c < shape_.columns; ++c) {
-        const Trouble found = read_varying(r, c);
-        out.at(r, c) = found ? error(found) : compute();
+    if (row_.batch != nullptr && shape_.rows * shape_.columns >= Columns::kFewest) {
+      fill_in_batches(out);
+    } else {
+      for (std::size_t r = 0; r < shape_.rows; ++r) {
+        for (std::size_t c = 0; c < shape_.columns; ++c) out.at(r, c) = read_and_compute(r, c);
       }
     }
     return out;
@@ -180,6 +183,39 @@ class Caller {
       return {{Fault::too_large, 0, "would fill more cells than one call may"}, {}};
     }
     return {};
+  }
+
+  Cell read_and_compute(std::size_t r, std::size_t c) {
+    const Trouble found = read_varying(r, c);
+    return found ? error(found) : compute();
+  }
+
+  // What the batch kernel does not answer, for whatever reason, is computed as a single cell.
+  void fill_in_batches(Grid& out) {
+    std::array<Spread, kMostArguments> varying{};
+    for (std::size_t i = 0; i < varying_count_; ++i) {
+      varying[i] = {arguments_[varying_[i]], varying_[i]};
+    }
+    const auto batches =
+        std::make_unique<Columns>(row_, units_, slots_, std::span(varying).first(varying_count_));
+    const std::size_t cells = shape_.rows * shape_.columns;
+    std::size_t r = 0;
+    std::size_t c = 0;
+    for (std::size_t done = 0; done < cells; done += Columns::kMost) {
+      const std::size_t count = std::min(Columns::kMost, cells - done);
+      for (const double number : batches->compute(done, count, shape_.columns)) {
+        Cell& cell = out.at(r, c);
+        if (std::isfinite(number)) {
+          cell = number;
+        } else {
+          cell = read_and_compute(r, c);
+        }
+        if (++c == shape_.columns) {
+          c = 0;
+          ++r;
+        }
+      }
+    }
   }
 
   Trouble read_varying(std::size_t r, std::size_t c) {

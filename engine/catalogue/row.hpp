@@ -209,6 +209,22 @@ using Explain = void (*)(const Slot* in, const Result& result, UnitSet units, st
 
 using Thunk = Failure (*)(const Slot* in, UnitSet units, Result& out);
 
+/// A column of numbers of one quantity, in SI, as a batch kernel takes and fills it.
+template <class Q>
+struct Column {
+  const double* si;
+};
+template <class Q>
+struct Answers {
+  double* si;
+};
+
+/// A batch kernel bound to a row: columns of `count` numbers, one for each argument, to the column
+/// of the results. What is not a number in the result is asked of the kernel again, one by one, so
+/// that failures and their reasons have one source. A column holds NaN where the number in the cell
+/// is none or is outside its range.
+using Batch = void (*)(const double* const* in, double* out, std::size_t count);
+
 inline constexpr std::size_t kMostArguments = 8;
 
 struct Row {
@@ -219,6 +235,7 @@ struct Row {
   bool has_options = false;
   Thunk thunk = nullptr;
   Explain explain = nullptr;
+  Batch batch = nullptr;  ///< the same as the thunk to the last bit, for whole columns
 
   [[nodiscard]] std::size_t argument_count() const {
     return arguments.size() + (has_options ? 1 : 0);
@@ -274,11 +291,30 @@ struct Bind<Kernel> {
   }
 };
 
-}  // namespace detail
+// A batch kernel must take what the kernel takes and give what it gives.
+template <auto Kernel, auto BatchKernel>
+struct BindBatch;
 
-/// Binds a kernel to its words. What does not fit does not compile.
+template <class R, class... A, Outcome<R> (*Kernel)(A...), auto BatchKernel>
+struct BindBatch<Kernel, BatchKernel> {
+  static_assert(
+      std::is_same_v<decltype(BatchKernel), void (*)(Column<A>..., Answers<R>, std::size_t)>,
+      "a batch kernel takes the columns of the kernel's arguments");
+  static_assert(Typed<R>::result.kind == ResultKind::number, "a batch kernel gives numbers");
+  static_assert(((Typed<A>::type.kind == Kind::number && !Typed<A>::type.optional) && ...),
+                "a batch kernel takes numbers, none of them optional");
+
+  static void batch(const double* const* in, double* out, std::size_t count) {
+    [&]<std::size_t... I>(std::index_sequence<I...>) {
+      BatchKernel(Column<A>{in[I]}..., Answers<R>{out}, count);
+    }
+    (std::index_sequence_for<A...>{});
+  }
+};
+
 template <auto Kernel, std::size_t N>
-consteval Row row(const Words& words, const Argument (&arguments)[N], Explain explain = nullptr) {
+constexpr Row checked_row(const Words& words, const Argument (&arguments)[N], Explain explain,
+                          Batch batch) {
   using Bound = detail::Bind<Kernel>;
   static_assert(N == Bound::kCount, "one Argument for each parameter of the kernel");
   static_assert(N < kMostArguments, "more arguments than a call can hold");
@@ -301,7 +337,24 @@ consteval Row row(const Words& words, const Argument (&arguments)[N], Explain ex
           Bound::kResult,
           Bound::has_options(),
           &Bound::thunk,
-          explain};
+          explain,
+          batch};
+}
+
+}  // namespace detail
+
+/// Binds a kernel to its words. What does not fit does not compile.
+template <auto Kernel, std::size_t N>
+consteval Row row(const Words& words, const Argument (&arguments)[N], Explain explain = nullptr) {
+  return detail::checked_row<Kernel>(words, arguments, explain, nullptr);
+}
+
+/// The same with a batch kernel for calls over ranges: void(Column<A>..., Answers<R>, count).
+template <auto Kernel, auto BatchKernel, std::size_t N>
+consteval Row row_with_batch(const Words& words, const Argument (&arguments)[N],
+                             Explain explain = nullptr) {
+  return detail::checked_row<Kernel>(words, arguments, explain,
+                                     &detail::BindBatch<Kernel, BatchKernel>::batch);
 }
 
 }  // namespace busbar

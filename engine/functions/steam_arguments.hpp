@@ -25,6 +25,21 @@ inline constexpr Argument kEntropyArgument{
 inline constexpr Argument kFlowArgument{"flow", "Mass flow; leave it out where it is not known",
                                         kAboveZero, 1e6};
 
+/// Batch kernels of water/batch as the catalogue takes them.
+template <class R, class A, void (*kBatch)(const double*, double*, std::size_t)>
+void column(Column<A> a, Answers<R> out, std::size_t count) {
+  kBatch(a.si, out.si, count);
+}
+template <class R, class A, class B,
+          void (*kBatch)(const double*, const double*, double*, std::size_t)>
+void columns(Column<A> a, Column<B> b, Answers<R> out, std::size_t count) {
+  kBatch(a.si, b.si, out.si, count);
+}
+template <class R, void (*kBatch)(const double*, const double*, double*, std::size_t)>
+void columns_pt(Column<Pressure> p, Column<Temperature> t, Answers<R> out, std::size_t count) {
+  kBatch(p.si, t.si, out.si, count);
+}
+
 /// A property of a state: any function of water/properties and water/transport.
 using PropertyOf = Outcome<double> (*)(const water::State&);
 

@@ -1,6 +1,7 @@
 // Properties of water and steam as plain numbers: energies, second derivatives, saturation.
 #include "functions/functions.hpp"
 #include "functions/steam_arguments.hpp"
+#include "water/batch/pressure_temperature.hpp"
 #include "water/properties/energy.hpp"
 #include "water/properties/response.hpp"
 
@@ -52,17 +53,23 @@ consteval Row number(const Words& words) {
                                                         explain_pressure_temperature);
 }
 
+template <class Q, PropertyOf kProperty, water::batch::AtPressureTemperature kBatch>
+consteval Row number_with_batch(const Words& words) {
+  return row_with_batch<at_pressure_and_temperature<Q, kProperty>, columns_pt<Q, kBatch>>(
+      words, kPressureTemperature, explain_pressure_temperature);
+}
+
 constexpr Row kRows[] = {
-    number<SpecificEnergy, water::internal_energy>(
+    number_with_batch<SpecificEnergy, water::internal_energy, water::batch::internal_energy>(
         words("STEAM_INTERNAL_ENERGY", "Specific internal energy at a pressure and a temperature",
               kLineNote, "Specific internal energy, zero in the liquid at the triple point",
               kEnergies, {"STEAM_INTERNAL_ENERGY(30; 26.85)", "112.324818"})),
-    number<SpecificEnergy, water::helmholtz_energy>(
+    number_with_batch<SpecificEnergy, water::helmholtz_energy, water::batch::helmholtz_energy>(
         words("STEAM_HELMHOLTZ_ENERGY",
               "Specific Helmholtz energy u - T s at a pressure and a temperature", kLineNote,
               "Specific Helmholtz (free) energy", kEnergies,
               {"STEAM_HELMHOLTZ_ENERGY(30; 26.85)", "-5.36361974"})),
-    number<SpecificEnergy, water::gibbs_energy>(
+    number_with_batch<SpecificEnergy, water::gibbs_energy, water::batch::gibbs_energy>(
         words("STEAM_GIBBS_ENERGY", "Specific Gibbs energy h - T s at a pressure and a temperature",
               kLineNote, "Specific Gibbs energy (free enthalpy)", kEnergies,
               {"STEAM_GIBBS_ENERGY(30; 26.85)", "-2.35716470"})),
