@@ -39,8 +39,13 @@ const char* words_for(CalcError error) {
   }
 }
 
-// Arguments that are lifted over a range take one element a result; the others take it whole.
-bool is_lifted(std::int32_t kind) {
+// Arguments that are lifted over a range take one element a result; the others take it whole. A
+// composition is a table, or a row or column of texts.
+bool is_lifted(std::int32_t kind, const Any& given) {
+  if (kind == BUSBAR_ARGUMENT_COMPOSITION) {
+    const Shape shape = shape_of(given);
+    return shape.rows == 1 || shape.columns == 1;
+  }
   return kind != BUSBAR_ARGUMENT_NUMBERS && kind != BUSBAR_ARGUMENT_STREAMS &&
          kind != BUSBAR_ARGUMENT_CELL && kind != BUSBAR_ARGUMENT_OPTIONS;
 }
@@ -65,7 +70,7 @@ bool fit_together(const busbar_function* function, const std::vector<Any>& given
     return part == 1 || part == most;
   };
   for (std::size_t i = 0; i < given.size(); ++i) {
-    if (!given[i].hasValue() || !is_lifted(kind_of_argument(function, i))) continue;
+    if (!given[i].hasValue() || !is_lifted(kind_of_argument(function, i), given[i])) continue;
     const Shape shape = shape_of(given[i]);
     if (!fits(whole.rows, shape.rows) || !fits(whole.columns, shape.columns)) return false;
   }
@@ -366,7 +371,7 @@ Result Evaluator::compute_engine_call(const Node& node, Want want) {
   std::vector<const busbar_value*> arguments(given.size());
   for (std::size_t i = 0; i < given.size(); ++i) {
     Any value = given[i];
-    if (by_element && value.hasValue() && is_lifted(kind_of_argument(node.function, i))) {
+    if (by_element && value.hasValue() && is_lifted(kind_of_argument(node.function, i), value)) {
       Result single = element_of_argument(node.children[i], value, values[i]);
       if (!single.usable()) return single;
       value = single.value;

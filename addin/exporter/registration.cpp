@@ -45,6 +45,8 @@ std::string kind_in_words(const Argument& argument) {
       return "any number of further arguments";
     case BUSBAR_ARGUMENT_OPTIONS:
       return "text";
+    case BUSBAR_ARGUMENT_COMPOSITION:
+      return "composition";
     default:
       return "value";
   }

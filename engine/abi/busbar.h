@@ -173,6 +173,7 @@ BUSBAR_API const char* busbar_argument_text(const busbar_function* function, siz
 #define BUSBAR_ARGUMENT_CELL 5    /* a reference to one cell, which the host explains itself */
 #define BUSBAR_ARGUMENT_REST 6    /* any further arguments, of any kind; always the last one */
 #define BUSBAR_ARGUMENT_OPTIONS 7
+#define BUSBAR_ARGUMENT_COMPOSITION 8 /* a text, or a table of two columns or two rows */
 BUSBAR_API int32_t busbar_argument_kind(const busbar_function* function, size_t argument);
 /* 1 when the argument may be left out, else 0. */
 BUSBAR_API int32_t busbar_argument_optional(const busbar_function* function, size_t argument);

@@ -151,9 +151,18 @@ Trouble read_cells(const Grid& grid, Take&& take) {
   return {};
 }
 
+// Made once; read anew for every row of a lifted call.
+GivenComposition& composition_of(std::size_t index, Workspace& space, Slot& slot) {
+  GivenComposition*& given = space.composition[index];
+  if (given == nullptr) given = &space.compositions.emplace_front();
+  slot.set(given, 1);
+  return *given;
+}
+
 }  // namespace
 
-bool is_lifted(Kind kind) {
+bool is_lifted(Kind kind, const Grid& grid) {
+  if (kind == Kind::composition) return grid.rows() == 1 || grid.columns() == 1;
   return kind == Kind::number || kind == Kind::stream || kind == Kind::word;
 }
 
@@ -170,6 +179,10 @@ Trouble read_cell(const Row& row, std::size_t index, const Cell& cell, UnitSet u
     }
     case Kind::word:
       return read_word(index, cell, slot);
+    case Kind::composition: {
+      GivenComposition& given = composition_of(index, space, slot);
+      return read_composition_cell(index, cell, row.types[index].gas, given);
+    }
     default:
       return {};
   }
@@ -178,6 +191,10 @@ Trouble read_cell(const Row& row, std::size_t index, const Cell& cell, UnitSet u
 Trouble read_range(const Row& row, std::size_t index, const Grid& grid, UnitSet units,
                    Workspace& space, Slot& slot) {
   slot.given = true;
+  if (row.types[index].kind == Kind::composition) {
+    return read_composition_table(index, grid, row.types[index].gas,
+                                  composition_of(index, space, slot));
+  }
   const std::size_t cells = grid.rows() * grid.columns();
   if (row.types[index].kind == Kind::streams) {
     auto& streams = space.streams.emplace_front();

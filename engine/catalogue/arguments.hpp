@@ -17,6 +17,8 @@ struct Workspace {
   std::array<std::optional<Stream>, kMostArguments> stream;
   std::forward_list<std::vector<double>> numbers;
   std::forward_list<std::vector<Stream>> streams;
+  std::forward_list<GivenComposition> compositions;
+  std::array<GivenComposition*, kMostArguments> composition{};
 };
 
 /// A failure and the text that was not understood, where there is one.
@@ -35,7 +37,8 @@ Trouble read_cell(const Row& row, std::size_t index, const Cell& cell, UnitSet u
 Trouble read_range(const Row& row, std::size_t index, const Grid& grid, UnitSet units,
                    Workspace& space, Slot& slot);
 
-/// True for kinds of arguments over whose ranges a call is lifted.
-bool is_lifted(Kind kind);
+/// True for arguments over whose ranges a call is lifted. A composition is lifted over a row or a
+/// column of texts and taken whole as a table.
+bool is_lifted(Kind kind, const Grid& grid);
 
 }  // namespace busbar

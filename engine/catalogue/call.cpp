@@ -157,7 +157,7 @@ class Caller {
       if (type.optional) return {};
       return {{Fault::missing, static_cast<std::uint8_t>(index + 1), "is left out"}, {}};
     }
-    if (!is_lifted(type.kind)) {
+    if (!is_lifted(type.kind, *grid)) {
       if (type.kind == Kind::cell) return {};
       return read_range(row_, index, *grid, units_, space_, slots_[index]);
     }
@@ -276,6 +276,9 @@ class Caller {
     Trouble found{failure, {}};
     if (failure.argument == 0 || failure.argument > row_.types.size()) return found;
     const std::size_t index = failure.argument - std::size_t{1};
+    if (row_.types[index].kind == Kind::composition) {
+      return placed(failure, slots_[index].composition());
+    }
     if (row_.types[index].kind == Kind::word) found.word = quotable(slots_[index].word());
     if (row_.types[index].kind == Kind::stream) found.word = slots_[index].stream->tag.text();
     return found;

@@ -19,6 +19,7 @@
 #include <type_traits>
 #include <utility>
 
+#include "catalogue/composition.hpp"
 #include "catalogue/value.hpp"
 #include "core/outcome.hpp"
 #include "core/units.hpp"
@@ -27,7 +28,17 @@
 namespace busbar {
 
 /// How an argument is taken; the numbers are those of BUSBAR_ARGUMENT_... in abi/busbar.h.
-enum class Kind : std::uint8_t { number, stream, word, numbers, streams, cell, rest, options };
+enum class Kind : std::uint8_t {
+  number,
+  stream,
+  word,
+  numbers,
+  streams,
+  cell,
+  rest,
+  options,
+  composition
+};
 
 /// What a kernel gives back.
 enum class ResultKind : std::uint8_t { number, stream, text, table };
@@ -36,6 +47,7 @@ struct Type {
   Kind kind = Kind::number;
   Quantity quantity = Quantity::number;
   bool optional = false;
+  bool gas = false;  ///< a composition whose parts are gas species
 };
 
 struct ResultType {
@@ -60,8 +72,9 @@ struct Text {
   std::string value;
 };
 
-/// One decoded argument. `data` and `size` hold a word, a range of numbers, a range of streams or
-/// the further arguments, as the argument's kind says; `stream` points into the call's workspace.
+/// One decoded argument. `data` and `size` hold a word, a range of numbers, a range of streams, a
+/// composition or the further arguments, as the argument's kind says; `stream` points into the
+/// call's workspace.
 struct Slot {
   bool given = false;
   double si = 0;
@@ -79,6 +92,9 @@ struct Slot {
     return {static_cast<const double*>(data), size};
   }
   [[nodiscard]] Streams streams() const { return {static_cast<const Stream*>(data), size}; }
+  [[nodiscard]] const GivenComposition& composition() const {
+    return *static_cast<const GivenComposition*>(data);
+  }
   [[nodiscard]] Rest rest() const { return {static_cast<const Grid* const*>(data), size}; }
 };
 
@@ -137,6 +153,20 @@ template <>
 struct Typed<Streams> {
   static constexpr Type type{Kind::streams, Quantity::number, false};
   static Streams take(const Slot& slot) { return slot.streams(); }
+};
+
+/// Named parts as they were given: what the names mean and whether the sum matters is the kernel's.
+template <>
+struct Typed<Composition> {
+  static constexpr Type type{Kind::composition, Quantity::number, false};
+  static const Composition& take(const Slot& slot) { return slot.composition().composition; }
+};
+
+/// A composition of gas species that sums to 1.
+template <>
+struct Typed<gas::Mixture> {
+  static constexpr Type type{Kind::composition, Quantity::number, false, true};
+  static const gas::Mixture& take(const Slot& slot) { return slot.composition().mixture; }
 };
 
 template <>

@@ -21,6 +21,8 @@ std::span<const Row> steam_properties();
 std::span<const Row> steam_transport();
 std::span<const Row> steam_pairs();
 std::span<const Row> stream_properties();
+std::span<const Row> compositions();
+std::span<const Row> gases();
 std::span<const Row> diagrams();
 std::span<const Row> fuel_moisture();
 std::span<const Row> fuel_library();

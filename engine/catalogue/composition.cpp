@@ -1,0 +1,216 @@
+#include "catalogue/composition.hpp"
+
+#include <cmath>
+
+#include "catalogue/arguments.hpp"
+#include "catalogue/sentence.hpp"
+#include "core/text.hpp"
+#include "gas/published.hpp"
+
+namespace busbar {
+namespace {
+
+constexpr double kHundredPercent = 100;
+
+std::uint8_t position(std::size_t index) { return static_cast<std::uint8_t>(index + 1); }
+
+Trouble trouble(Fault fault, std::size_t index, const char* reason, std::string word = {}) {
+  return {{fault, position(index), reason}, std::move(word)};
+}
+
+// A table of two columns, or of two rows, seen as lines of a name and an amount.
+class Lines {
+ public:
+  Lines(const Grid& grid, bool horizontal) : grid_(grid), horizontal_(horizontal) {}
+
+  [[nodiscard]] std::size_t count() const { return horizontal_ ? grid_.columns() : grid_.rows(); }
+  [[nodiscard]] const Cell& at(std::size_t line, std::size_t place) const {
+    return horizontal_ ? grid_.at(place, line) : grid_.at(line, place);
+  }
+  [[nodiscard]] Trouble found_at(Trouble found, std::size_t line, std::size_t place) const {
+    found.failure.row = static_cast<std::uint32_t>((horizontal_ ? place : line) + 1);
+    found.failure.column = static_cast<std::uint32_t>((horizontal_ ? line : place) + 1);
+    return found;
+  }
+
+ private:
+  const Grid& grid_;
+  bool horizontal_;
+};
+
+std::string_view text_in(const Cell& cell) {
+  const auto* text = std::get_if<std::string>(&cell);
+  return text == nullptr ? std::string_view{} : trimmed(*text);
+}
+
+bool is_blank(const Cell& cell) {
+  if (std::holds_alternative<Blank>(cell)) return true;
+  const auto* text = std::get_if<std::string>(&cell);
+  return text != nullptr && trimmed(*text).empty();
+}
+
+Trouble inner_error(std::size_t index, const Error& error) {
+  const Problem& inner = error.problem();
+  return trouble(inner.failure.fault, index, "is itself an error",
+                 inner.row != nullptr ? sentence(inner) : std::string{});
+}
+
+Trouble resolved(std::size_t index, bool as_gas, GivenComposition& given) {
+  if (!as_gas) return {};
+  const Outcome<gas::Mixture> mixture = gas::Mixture::from(given.composition);
+  if (!mixture) return placed(mixture.failure().about(position(index)), given);
+  given.mixture = *mixture;
+  return {};
+}
+
+// The heading over the amounts.
+Trouble read_table_heading(std::size_t index, const Lines& lines, Heading& heading) {
+  const Cell& cell = lines.at(0, 1);
+  if (const auto* error = std::get_if<Error>(&cell)) {
+    return lines.found_at(inner_error(index, *error), 0, 1);
+  }
+  const std::string_view text = text_in(cell);
+  if (const auto read = read_heading(text)) {
+    heading = *read;
+    return {};
+  }
+  if (is_blank(cell)) {
+    return lines.found_at(
+        trouble(Fault::missing, index,
+                "is blank: the heading over the amounts states their basis, \"mole\", \"mole %\", "
+                "\"mass\" or \"mass %\""),
+        0, 1);
+  }
+  if (text.empty()) {
+    return lines.found_at(
+        trouble(Fault::wrong_kind, index,
+                "is no heading: the first line states the basis of the amounts, \"mole\", \"mole "
+                "%\", \"mass\" or \"mass %\""),
+        0, 1);
+  }
+  return lines.found_at(trouble(Fault::unknown_word, index, why_no_heading(text), quotable(text)),
+                        0, 1);
+}
+
+Trouble read_line(std::size_t index, const Lines& lines, std::size_t line, const Heading& heading,
+                  Part& part) {
+  const Cell& name = lines.at(line, 0);
+  const Cell& amount = lines.at(line, 1);
+  for (const std::size_t place : {std::size_t{0}, std::size_t{1}}) {
+    if (const auto* error = std::get_if<Error>(&lines.at(line, place))) {
+      return lines.found_at(inner_error(index, *error), line, place);
+    }
+  }
+  part.name = text_in(name);
+  if (part.name.empty()) {
+    const bool blank = is_blank(name);
+    return lines.found_at(
+        trouble(blank ? Fault::missing : Fault::wrong_kind, index,
+                blank ? "is blank: an amount has no name" : "is no text: a name is needed"),
+        line, 0);
+  }
+  const double* number = std::get_if<double>(&amount);
+  if (number == nullptr) {
+    const bool blank = is_blank(amount);
+    return lines.found_at(
+        trouble(blank ? Fault::missing : Fault::wrong_kind, index,
+                blank ? "has no amount" : "has an amount that is no number", quotable(part.name)),
+        line, 1);
+  }
+  if (!std::isfinite(*number)) {
+    return lines.found_at(trouble(Fault::outside_range, index, "has an amount that is not finite",
+                                  quotable(part.name)),
+                          line, 1);
+  }
+  part.amount = heading.percent ? *number / kHundredPercent : *number;
+  return {};
+}
+
+}  // namespace
+
+Trouble read_composition_cell(std::size_t index, const Cell& cell, bool as_gas,
+                              GivenComposition& given) {
+  given.table = false;
+  const auto* text = std::get_if<std::string>(&cell);
+  if (text == nullptr || trimmed(*text).empty()) {
+    if (const double* number = std::get_if<double>(&cell)) {
+      if (*number == 0) {
+        return trouble(Fault::zero_or_blank, index,
+                       "is zero or blank where a composition is needed");
+      }
+      return trouble(Fault::wrong_kind, index, "is a number where a composition is needed");
+    }
+    if (const auto* error = std::get_if<Error>(&cell)) return inner_error(index, *error);
+    if (std::holds_alternative<bool>(cell)) {
+      return trouble(Fault::wrong_kind, index, "is a logical where a composition is needed");
+    }
+    return trouble(Fault::missing, index, text == nullptr ? "is blank" : "is empty");
+  }
+  if (const gas::PublishedMixture* mixture = gas::published_mixture(trimmed(*text))) {
+    given.composition.basis = mixture->basis;
+    given.composition.parts.assign(mixture->parts.begin(), mixture->parts.end());
+    return resolved(index, as_gas, given);
+  }
+  Trouble found;
+  Outcome<Composition> read = read_composition(*text, found.word);
+  if (!read) {
+    found.failure = read.failure().about(position(index));
+    return found;
+  }
+  given.composition = std::move(*read);
+  return resolved(index, as_gas, given);
+}
+
+Trouble read_composition_table(std::size_t index, const Grid& grid, bool as_gas,
+                               GivenComposition& given) {
+  // Two columns unless the heading stands where that of two rows would.
+  const bool horizontal =
+      grid.rows() == 2 && (grid.columns() != 2 || (!read_heading(text_in(grid.at(0, 1))) &&
+                                                   read_heading(text_in(grid.at(1, 0)))));
+  if (!horizontal && grid.columns() != 2) {
+    return {{Fault::wrong_shape,
+             position(index),
+             "has {0} rows and {1} columns: names and amounts stand in two columns or in two rows",
+             {{{static_cast<double>(grid.rows()), Quantity::number},
+               {static_cast<double>(grid.columns()), Quantity::number}}}},
+            {}};
+  }
+  const Lines lines(grid, horizontal);
+  given.table = true;
+  given.horizontal = horizontal;
+  Heading heading;
+  if (Trouble found = read_table_heading(index, lines, heading)) return found;
+  given.composition.basis = heading.basis;
+  std::size_t end = lines.count();
+  while (end > 1 && is_blank(lines.at(end - 1, 0)) && is_blank(lines.at(end - 1, 1))) --end;
+  if (end == 1) return trouble(Fault::missing, index, "holds a heading and no parts");
+  if (end - 1 > kMostParts) {
+    return {{Fault::too_large,
+             position(index),
+             "has more than {0} parts",
+             {{{static_cast<double>(kMostParts), Quantity::number}}}},
+            {}};
+  }
+  given.composition.parts.resize(end - 1);
+  for (std::size_t i = 1; i < end; ++i) {
+    if (Trouble found = read_line(index, lines, i, heading, given.composition.parts[i - 1])) {
+      return found;
+    }
+  }
+  return resolved(index, as_gas, given);
+}
+
+Trouble placed(const Failure& failure, const GivenComposition& given) {
+  Trouble found{failure, {}};
+  const std::size_t part = failure.row;
+  if (part == 0 || part > given.composition.parts.size()) return found;
+  found.word = quotable(given.composition.parts[part - 1].name);
+  found.failure.row = 0;
+  if (!given.table) return found;
+  const auto line = static_cast<std::uint32_t>(part + 1);
+  found.failure.row = given.horizontal ? 1 : line;
+  found.failure.column = given.horizontal ? line : 1;
+  return found;
+}
+
+}  // namespace busbar
