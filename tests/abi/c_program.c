@@ -253,7 +253,7 @@ static void catalogue(void) {
       const int32_t kind = busbar_argument_kind(function, argument);
       CHECK(strlen(busbar_argument_text(function, argument, BUSBAR_ARGUMENT_NAME)) > 0);
       CHECK(strlen(busbar_argument_text(function, argument, BUSBAR_ARGUMENT_MEANING)) > 0);
-      CHECK(kind >= BUSBAR_ARGUMENT_NUMBER && kind <= BUSBAR_ARGUMENT_OPTIONS);
+      CHECK(kind >= BUSBAR_ARGUMENT_NUMBER && kind <= BUSBAR_ARGUMENT_COMPOSITION);
     }
   }
   CHECK(busbar_find("steam", 5) == busbar_find("STEAM", 5));
