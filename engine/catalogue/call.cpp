@@ -70,6 +70,12 @@ class Caller {
     return !row_.types.empty() && row_.types.back().kind == Kind::rest;
   }
 
+  [[nodiscard]] bool takes_whole_range() const {
+    if (row_.types.empty()) return false;
+    const Kind first = row_.types.front().kind;
+    return first == Kind::numbers || first == Kind::streams;
+  }
+
   Trouble prepare() {
     if (arguments_.size() > row_.argument_count() && !has_rest()) return too_many();
     if (Trouble found = read_units()) return found;
@@ -87,12 +93,7 @@ class Caller {
     const Measure given{static_cast<double>(arguments_.size()), Quantity::number};
     const char* reason = "takes {0} arguments at the most; {1} were given";
     if (row_.argument_count() == 1) reason = "takes one argument; {1} were given";
-    if (!row_.types.empty()) {
-      const Kind first = row_.types.front().kind;
-      if (first == Kind::numbers || first == Kind::streams) {
-        reason = "takes one range, not a list of {1} arguments";
-      }
-    }
+    if (takes_whole_range()) reason = "takes one range, not a list of {1} arguments";
     return {{Fault::wrong_shape, 0, reason, {{most, given}}}, {}};
   }
 
@@ -119,7 +120,11 @@ class Caller {
     const auto at = static_cast<std::uint8_t>(row_.arguments.size() + 1);
     if (grid == nullptr) return {};
     if (!grid->is_single()) {
-      return {{Fault::wrong_shape, at, "is a range; one cell with the unit set is needed"}, {}};
+      const char* reason = takes_whole_range()
+                               ? "is a second range where the options belong; the function takes "
+                                 "one range that holds all its cells"
+                               : "is a range; one cell with the unit set is needed";
+      return {{Fault::wrong_shape, at, reason}, {}};
     }
     const Cell& cell = grid->at(0, 0);
     if (const double* number = std::get_if<double>(&cell); number != nullptr && *number == 0) {

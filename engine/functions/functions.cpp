@@ -23,9 +23,25 @@ std::string capitals(std::string_view name) {
 
 std::vector<const Row*> gather() {
   std::vector<const Row*> rows;
-  for (const auto chapter : {steam(), streams(), machines(), limits(), performance(), units(),
-                             explanation(), steam_properties(), steam_transport(), steam_pairs(),
-                             stream_properties(), diagrams(), fuel_moisture(), fuel_library()}) {
+  for (const auto chapter : {
+           steam(),
+           streams(),
+           machines(),
+           limits(),
+           performance(),
+           units(),
+           explanation(),
+           steam_properties(),
+           steam_transport(),
+           steam_pairs(),
+           stream_properties(),
+           compositions(),
+           gases(),
+           diagrams(),
+           fuel_moisture(),
+           fuel_library(),
+           boiler_losses(),
+       }) {
     for (const Row& row : chapter) rows.push_back(&row);
   }
   return rows;

@@ -26,6 +26,7 @@ std::span<const Row> gases();
 std::span<const Row> diagrams();
 std::span<const Row> fuel_moisture();
 std::span<const Row> fuel_library();
+std::span<const Row> boiler_losses();
 
 /// All rows in the order of the chapters above.
 std::span<const Row* const> all();

@@ -251,6 +251,12 @@ class Calls(SheetCase):
     def test_texts_outside_the_basic_plane_and_lone_surrogates(self):
         self.document.set("A1", '=TAGGED(STEAM(100;540);"LBA\u2082\U0001f525")')
         self.assertTrue(self.document.text("A1").startswith("LBA\u2082\U0001f525: steam"))
+        # The first and last letters that one byte each would hold, and the first beyond.
+        for tag in ("\u00a1\u00ff", "\u00ff\u0100", "K\u00fchler " + "\u00e9" * 14):
+            self.document.set("A1", f'=TAGGED(STEAM(100;540);"{tag}")')
+            self.assertTrue(self.document.text("A1").startswith(f"{tag}: steam"))
+            self.document.set("B1", "=INDEX(STREAM_TABLE(A1);2;1)")
+            self.assertEqual(self.document.text("B1"), tag)
         self.document.set("A2", '=TAGGED(STEAM(100;540);LEFT("\U0001f525";1))')
         self.document.text("A2")
         self.assertTrue(self.office.alive())

@@ -496,6 +496,7 @@ class Mistakes(SheetCase):
             "=STREAM_TABLE(A1;A2)", "#VALUE!", 'options "steam 3 kg/s" is a stream', "one range"
         )
         self.assert_told("=STREAM_TABLE(A1;A2;A1)", "Err:504", "takes one range")
+        self.assert_told("=STREAM_TABLE(A1:A2;A1:A2)", "#VALUE!", "second range where the options belong")
         self.assert_told("=MIX_OUT(A1;A2)", "Err:504", "takes one range")
 
     def test_flows_forgotten(self):
