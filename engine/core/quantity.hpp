@@ -37,6 +37,17 @@ enum class Quantity : std::uint8_t {
   volume_heating_value,    ///< by volume at stated reference conditions, J/m3
   molar_mass,              ///< kg/mol
   molar_volume,            ///< m3/mol
+  length,                  ///< length, height, altitude; m
+  component_power,         ///< losses, motors and single auxiliaries; W
+  apparent_power,          ///< VA
+  reactive_power,          ///< var
+  voltage,                 ///< V
+  current,                 ///< A
+  resistance,              ///< ohm
+  magnetic_flux,           ///< Wb
+  flux_density,            ///< T
+  frequency,               ///< Hz
+  rotational_speed,        ///< turns per second, 1/s
   same_unit,               ///< any unit; the result of the function is in the same one
   count_
 };
@@ -76,6 +87,17 @@ using MolarHeatingValue = Of<Quantity::molar_heating_value>;
 using VolumeHeatingValue = Of<Quantity::volume_heating_value>;
 using MolarMass = Of<Quantity::molar_mass>;
 using MolarVolume = Of<Quantity::molar_volume>;
+using Length = Of<Quantity::length>;
+using ComponentPower = Of<Quantity::component_power>;
+using ApparentPower = Of<Quantity::apparent_power>;
+using ReactivePower = Of<Quantity::reactive_power>;
+using Voltage = Of<Quantity::voltage>;
+using Current = Of<Quantity::current>;
+using Resistance = Of<Quantity::resistance>;
+using MagneticFlux = Of<Quantity::magnetic_flux>;
+using FluxDensity = Of<Quantity::flux_density>;
+using Frequency = Of<Quantity::frequency>;
+using RotationalSpeed = Of<Quantity::rotational_speed>;
 using SameUnit = Of<Quantity::same_unit>;
 
 }  // namespace busbar

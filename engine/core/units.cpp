@@ -72,6 +72,17 @@ constexpr std::array<QuantityUnits, kQuantities> kTable{{
      {{{"kg/kmol", 1, 1e3, 0}, {"lb/lbmol", kPound, kPoundMole, 0}, {"kg/mol", 1, 1, 0}}}},
     {"molar volume",
      {{{"m³/kmol", 1, 1e3, 0}, {"ft³/lbmol", kCubicFoot, kPoundMole, 0}, {"m³/mol", 1, 1, 0}}}},
+    {"length", {{{"m", 1, 1, 0}, {"ft", kFoot, 1, 0}, {"m", 1, 1, 0}}}},
+    {"power of a component", {{{"kW", 1e3, 1, 0}, {"kW", 1e3, 1, 0}, {"W", 1, 1, 0}}}},
+    {"apparent power", {{{"MVA", 1e6, 1, 0}, {"MVA", 1e6, 1, 0}, {"VA", 1, 1, 0}}}},
+    {"reactive power", {{{"Mvar", 1e6, 1, 0}, {"Mvar", 1e6, 1, 0}, {"var", 1, 1, 0}}}},
+    {"voltage", {{{"kV", 1e3, 1, 0}, {"kV", 1e3, 1, 0}, {"V", 1, 1, 0}}}},
+    {"current", {{{"A", 1, 1, 0}, {"A", 1, 1, 0}, {"A", 1, 1, 0}}}},
+    {"resistance", {{{"Ω", 1, 1, 0}, {"Ω", 1, 1, 0}, {"Ω", 1, 1, 0}}}},
+    {"magnetic flux", {{{"Wb", 1, 1, 0}, {"Wb", 1, 1, 0}, {"Wb", 1, 1, 0}}}},
+    {"magnetic flux density", {{{"T", 1, 1, 0}, {"T", 1, 1, 0}, {"T", 1, 1, 0}}}},
+    {"frequency", {{{"Hz", 1, 1, 0}, {"Hz", 1, 1, 0}, {"Hz", 1, 1, 0}}}},
+    {"rotational speed", {{{"rpm", 1, 60, 0}, {"rpm", 1, 60, 0}, {"1/s", 1, 1, 0}}}},
     {"amount", {kOne, kOne, kOne}},
 }};
 

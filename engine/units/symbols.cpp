@@ -21,6 +21,9 @@ constexpr Dimension kPressure{1, -1, -2, 0, 0, 0};
 constexpr Dimension kEnergy{1, 2, -2, 0, 0, 0};
 constexpr Dimension kPower{1, 2, -3, 0, 0, 0};
 constexpr Dimension kVoltage{1, 2, -3, 0, 0, -1};
+constexpr Dimension kResistance{1, 2, -3, 0, 0, -2};
+constexpr Dimension kFlux{1, 2, -2, 0, 0, -1};
+constexpr Dimension kFluxDensity{1, 0, -2, 0, 0, -1};
 
 // Exact by definition (NIST SP 811, appendix B): inch, pound, standard acceleration of free fall,
 // International Table Btu and calorie, gallon of 231 cubic inches.
@@ -128,6 +131,13 @@ constexpr std::array kSymbols{
     prefixed("A", kCurrent, 1),
     prefixed("V", kVoltage, 1),
     prefixed("VA", kPower, 1),
+    prefixed("var", kPower, 1),
+    prefixed("Ω", kResistance, 1),
+    prefixed("ohm", kResistance, 1),
+    plain("Wb", kFlux, 1),
+    plain("mWb", kFlux, 1e-3),
+    plain("T", kFluxDensity, 1),
+    plain("mT", kFluxDensity, 1e-3),
 };
 
 struct Prefix {
