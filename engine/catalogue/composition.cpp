@@ -18,12 +18,13 @@ Trouble trouble(Fault fault, std::size_t index, const char* reason, std::string 
   return {{fault, position(index), reason}, std::move(word)};
 }
 
-// A table of two columns, or of two rows, seen as lines of a name and an amount.
+// A table of two or three columns, or rows, seen as lines of a name, an amount and an uncertainty.
 class Lines {
  public:
   Lines(const Grid& grid, bool horizontal) : grid_(grid), horizontal_(horizontal) {}
 
   [[nodiscard]] std::size_t count() const { return horizontal_ ? grid_.columns() : grid_.rows(); }
+  [[nodiscard]] std::size_t places() const { return horizontal_ ? grid_.rows() : grid_.columns(); }
   [[nodiscard]] const Cell& at(std::size_t line, std::size_t place) const {
     return horizontal_ ? grid_.at(place, line) : grid_.at(line, place);
   }
@@ -92,11 +93,44 @@ Trouble read_table_heading(std::size_t index, const Lines& lines, Heading& headi
                         0, 1);
 }
 
+// The heading over the uncertainties, where there is such a column.
+Trouble read_uncertainty_heading(std::size_t index, const Lines& lines) {
+  if (lines.places() < 3) return {};
+  const Cell& cell = lines.at(0, 2);
+  if (const auto* error = std::get_if<Error>(&cell)) {
+    return lines.found_at(inner_error(index, *error), 0, 2);
+  }
+  const std::string_view text = text_in(cell);
+  if (equal_ignoring_case(text, "standard uncertainty")) return {};
+  return lines.found_at(
+      trouble(is_blank(cell) ? Fault::missing : Fault::unknown_word, index,
+              "is no heading for what stands beside the amounts: only their \"standard "
+              "uncertainty\" may, in the same unit (half of an expanded one of k = 2)",
+              quotable(text)),
+      0, 2);
+}
+
+Trouble read_uncertainty(std::size_t index, const Lines& lines, std::size_t line,
+                         const Heading& heading, Part& part) {
+  if (lines.places() < 3 || is_blank(lines.at(line, 2))) return {};
+  const double* number = std::get_if<double>(&lines.at(line, 2));
+  if (number == nullptr || !std::isfinite(*number)) {
+    return lines.found_at(
+        trouble(number == nullptr ? Fault::wrong_kind : Fault::outside_range, index,
+                number == nullptr ? "has an uncertainty that is no number"
+                                  : "has an uncertainty that is not finite",
+                quotable(part.name)),
+        line, 2);
+  }
+  part.uncertainty = heading.percent ? *number / kHundredPercent : *number;
+  return {};
+}
+
 Trouble read_line(std::size_t index, const Lines& lines, std::size_t line, const Heading& heading,
                   Part& part) {
   const Cell& name = lines.at(line, 0);
   const Cell& amount = lines.at(line, 1);
-  for (const std::size_t place : {std::size_t{0}, std::size_t{1}}) {
+  for (std::size_t place = 0; place < lines.places(); ++place) {
     if (const auto* error = std::get_if<Error>(&lines.at(line, place))) {
       return lines.found_at(inner_error(index, *error), line, place);
     }
@@ -123,7 +157,7 @@ Trouble read_line(std::size_t index, const Lines& lines, std::size_t line, const
                           line, 1);
   }
   part.amount = heading.percent ? *number / kHundredPercent : *number;
-  return {};
+  return read_uncertainty(index, lines, line, heading, part);
 }
 
 }  // namespace
@@ -163,11 +197,12 @@ Trouble read_composition_cell(std::size_t index, const Cell& cell, bool as_gas,
 
 Trouble read_composition_table(std::size_t index, const Grid& grid, bool as_gas,
                                GivenComposition& given) {
-  // Two columns unless the heading stands where that of two rows would.
+  // Columns unless the heading stands where that of rows would.
+  const auto few = [](std::size_t count) { return count == 2 || count == 3; };
   const bool horizontal =
-      grid.rows() == 2 && (grid.columns() != 2 || (!read_heading(text_in(grid.at(0, 1))) &&
-                                                   read_heading(text_in(grid.at(1, 0)))));
-  if (!horizontal && grid.columns() != 2) {
+      few(grid.rows()) && (!few(grid.columns()) || (!read_heading(text_in(grid.at(0, 1))) &&
+                                                    read_heading(text_in(grid.at(1, 0)))));
+  if (!horizontal && !few(grid.columns())) {
     return {{Fault::wrong_shape,
              position(index),
              "has {0} rows and {1} columns: names and amounts stand in two columns or in two rows",
@@ -180,6 +215,7 @@ Trouble read_composition_table(std::size_t index, const Grid& grid, bool as_gas,
   given.horizontal = horizontal;
   Heading heading;
   if (Trouble found = read_table_heading(index, lines, heading)) return found;
+  if (Trouble found = read_uncertainty_heading(index, lines)) return found;
   given.composition.basis = heading.basis;
   std::size_t end = lines.count();
   while (end > 1 && is_blank(lines.at(end - 1, 0)) && is_blank(lines.at(end - 1, 1))) --end;

@@ -2,6 +2,7 @@
 //
 //   a table     two columns (or two rows): a heading that states the basis ("mole", "mole %",
 //               "mass", "mass %") over the amounts, names beside them; blank lines at its end
+//               may follow; a third column, headed "standard uncertainty", is in the same unit
 //   a text      "mole: CH4 0.92, C2H6 0.05, N2 0.03"
 //   a name      "dry air, ISO 2533", see gas/published.cpp
 //

@@ -149,6 +149,14 @@ struct Typed<Numbers<Of<Q>>> {
   static Numbers<Of<Q>> take(const Slot& slot) { return {slot.numbers()}; }
 };
 
+template <Quantity Q>
+struct Typed<std::optional<Numbers<Of<Q>>>> {
+  static constexpr Type type{Kind::numbers, Q, true};
+  static std::optional<Numbers<Of<Q>>> take(const Slot& slot) {
+    return slot.given ? std::optional<Numbers<Of<Q>>>{{slot.numbers()}} : std::nullopt;
+  }
+};
+
 template <>
 struct Typed<Streams> {
   static constexpr Type type{Kind::streams, Quantity::number, false};

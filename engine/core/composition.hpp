@@ -18,6 +18,7 @@ enum class Basis : std::uint8_t { mole, mass };
 struct Part {
   std::string_view name;
   double amount = 0;
+  std::optional<double> uncertainty = std::nullopt;  ///< standard, of the amount
 };
 
 /// Amounts as they were given: nothing is normalised. Failures of those who take a composition

@@ -41,6 +41,9 @@ std::vector<const Row*> gather() {
            fuel_moisture(),
            fuel_library(),
            boiler_losses(),
+           gaseous_fuels(),
+           gaseous_fuel_tables(),
+           gaseous_fuel_data(),
        }) {
     for (const Row& row : chapter) rows.push_back(&row);
   }

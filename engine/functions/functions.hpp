@@ -27,6 +27,9 @@ std::span<const Row> diagrams();
 std::span<const Row> fuel_moisture();
 std::span<const Row> fuel_library();
 std::span<const Row> boiler_losses();
+std::span<const Row> gaseous_fuels();
+std::span<const Row> gaseous_fuel_tables();
+std::span<const Row> gaseous_fuel_data();
 
 /// All rows in the order of the chapters above.
 std::span<const Row* const> all();

@@ -120,8 +120,8 @@ TEST(CompositionArgument, NamesThePartThatIsWrong) {
 TEST(CompositionArgument, IsNoNumberAndNoOtherShape) {
   expect_reason(mass_of("0"), BUSBAR_ERROR_RANGE, {"zero or blank", "composition"});
   expect_reason(mass_of("21"), BUSBAR_ERROR_VALUE, {"is a number"});
-  expect_reason(mass_of("{1; 2; 3 | 4; 5; 6 | 7; 8; 9}"), BUSBAR_ERROR_VALUE,
-                {"3 rows and 3 columns", "two columns"});
+  expect_reason(mass_of("{1; 2; 3; 4 | 4; 5; 6; 7 | 7; 8; 9; 1 | 1; 2; 3; 4}"), BUSBAR_ERROR_VALUE,
+                {"4 rows and 4 columns", "two columns"});
   expect_reason(mass_of("\"mole: N2 0,79\""), BUSBAR_ERROR_VALUE, {"\"79\"", "point"});
   expect_reason(mass_of("\"mole: N2 1,\""), BUSBAR_ERROR_VALUE, {"is no part"});
   expect_reason(mass_of("\"mole:\""), BUSBAR_ERROR_VALUE, {"is no part"});
