@@ -8,6 +8,7 @@
 #include "water/solve/assemble.hpp"
 #include "water/solve/density.hpp"
 #include "water/solve/isobar.hpp"
+#include "water/solve/isobar_volume.hpp"
 #include "water/solve/root.hpp"
 
 namespace busbar::water {
@@ -29,7 +30,14 @@ class VolumeOnIsobar {
  public:
   VolumeOnIsobar(double pressure, double volume) : pressure_(pressure), volume_(volume) {}
 
-  Outcome<State> find(const State& coldest) {
+  Outcome<Found> find(const State& coldest) {
+    const Outcome<State> state = search(coldest);
+    if (!state) return state.failure();
+    return Found{*state, evaluations_};
+  }
+
+ private:
+  Outcome<State> search(const State& coldest) {
     if (pressure_ < kLowestSaturationPressure) {
       if (volume_ < coldest.volume) return below(coldest.volume);
       return in_vapour(kLowestTemperature);
@@ -55,7 +63,6 @@ class VolumeOnIsobar {
     return in_region_3(boundary);
   }
 
- private:
   [[nodiscard]] Failure below(double limit) const {
     return make_failure(Fault::outside_range, 2, kBelow, {volume_, Quantity::volume},
                         {limit, Quantity::volume}, {kLowestTemperature, Quantity::temperature});
@@ -77,14 +84,17 @@ class VolumeOnIsobar {
   }
 
   template <Properties (*kProperties)(double, double)>
-  [[nodiscard]] Outcome<State> solve(Region region, double lowest, double highest) const {
-    const auto root = root_between(
-        [&](double t) { return kProperties(pressure_, t).volume - volume_; }, lowest, highest);
+  [[nodiscard]] Outcome<State> solve(Region region, double lowest, double highest) {
+    const auto excess = [&](double t) {
+      ++evaluations_;
+      return kProperties(pressure_, t).volume - volume_;
+    };
+    const auto root = root_between(excess, lowest, highest);
     if (!root) return not_converged();
     return kept(assembled(region, pressure_, *root, kProperties(pressure_, *root)));
   }
 
-  [[nodiscard]] Outcome<State> in_region_1(const State& coldest, double highest) const {
+  [[nodiscard]] Outcome<State> in_region_1(const State& coldest, double highest) {
     double lowest = kLowestTemperature;
     double least = coldest.volume;
     const auto expansion = [&](double t) { return response_1(pressure_, t).isobaric_expansion; };
@@ -106,7 +116,7 @@ class VolumeOnIsobar {
     return solve<properties_1>(Region::liquid, lowest, highest);
   }
 
-  [[nodiscard]] Outcome<State> in_vapour(double lowest) const {
+  [[nodiscard]] Outcome<State> in_vapour(double lowest) {
     const Properties top = properties_2(pressure_, kHighestTemperature2);
     if (volume_ <= top.volume) {
       return solve<properties_2>(Region::vapour, lowest, kHighestTemperature2);
@@ -127,7 +137,7 @@ class VolumeOnIsobar {
   }
 
   // The density is given: equation 28 at it rises with the temperature.
-  [[nodiscard]] Outcome<State> in_region_3(double boundary) const {
+  [[nodiscard]] Outcome<State> in_region_3(double boundary) {
     const DensityFound cold = density_3(pressure_, kTemperature13, true);
     const DensityFound hot = density_3(pressure_, boundary, false);
     if (!cold.converged || !hot.converged) return not_converged();
@@ -140,24 +150,33 @@ class VolumeOnIsobar {
                  properties_2(pressure_, boundary));
     }
     const double density = 1 / volume_;
-    const auto root =
-        root_between([&](double t) { return pressure_of_region_3(density, t) - pressure_; },
-                     kTemperature13, boundary);
+    const auto excess = [&](double t) {
+      ++evaluations_;
+      return pressure_of_region_3(density, t) - pressure_;
+    };
+    const auto root = root_between(excess, kTemperature13, boundary);
     if (!root) return not_converged();
     return kept(assembled(Region::near_critical, pressure_, *root, properties_3(density, *root)));
   }
 
   double pressure_;
   double volume_;
+  int evaluations_ = 0;
 };
 
 }  // namespace
 
-Outcome<State> at_pressure_volume(double pressure, double volume) {
+Outcome<Found> on_isobar_with_volume(double pressure, double volume) {
   const Outcome<State> coldest = at_pressure_temperature(pressure, kLowestTemperature);
   if (!coldest) return coldest.failure().about(1);
   if (!std::isfinite(volume)) return not_finite(2, {volume, Quantity::volume});
   return VolumeOnIsobar(pressure, volume).find(*coldest);
+}
+
+Outcome<State> at_pressure_volume(double pressure, double volume) {
+  const Outcome<Found> found = on_isobar_with_volume(pressure, volume);
+  if (!found) return found.failure();
+  return found->state;
 }
 
 // (du/dh)_p = 1 - p (dv/dh)_p is positive everywhere, also across wet steam: one root.

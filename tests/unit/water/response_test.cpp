@@ -14,6 +14,7 @@
 #include "sampling.hpp"
 #include "water/constants.hpp"
 #include "water/equations/saturation.hpp"
+#include "water/pairs.hpp"
 #include "water/properties/energy.hpp"
 #include "water/solve/properties.hpp"
 
@@ -187,11 +188,71 @@ TEST(Response, ThrottlingAndSoundAlongTheirLines) {
   }
 }
 
+#define EXPECT_SAME_SLOPE(a, b)                                                               \
+  EXPECT_NEAR((a).value, (b).value, 4 * ((a).error + (b).error) + 1e-9 * std::abs((a).value)) \
+      << "p " << state.pressure << ", T " << state.temperature << ", region "                 \
+      << static_cast<int>(state.region)
+
+// The four relations of Maxwell on random states, by differences of what the solvers answer:
+// enthalpy, Helmholtz energy and internal energy are functions of state whatever pair is given. The
+// fourth, of the Gibbs energy, stands above.
+TEST(Response, MaxwellThroughEveryPairOfProperties) {
+  Sampler sampler(44);
+  int seen[6] = {};
+  for (int k = 0; k < 3000; ++k) {
+    const State state = random_state(sampler);
+    const Response at = *response(state);
+    const double p = state.pressure;
+    const double t = state.temperature;
+    const double s = state.entropy;
+    const double v = state.volume;
+    ++seen[static_cast<int>(state.region)];
+
+    // dh = T ds + v dp: (dT/dp)_s = (dv/ds)_p
+    const double heat = kStep * at.isobaric_heat_capacity;
+    const auto warming = slope([&](double x) { return at_pressure_entropy(x, s)->temperature; }, p,
+                               kStep * p, kRounding);
+    const auto swelling =
+        slope([&](double x) { return at_pressure_entropy(p, x)->volume; }, s, heat, kRounding);
+    EXPECT_SAME_SLOPE(warming, swelling);
+
+    // da = -s dT - p dv: (ds/dv)_T = (dp/dT)_v. The pressure of a liquid hangs on the last digits
+    // of its volume.
+    const double stiffness = std::fmax(1, 1 / (at.isothermal_compressibility * p));
+    const double squeeze = kStep * at.isothermal_compressibility * p * v;
+    const double tension = std::abs(at.isobaric_expansion) / at.isothermal_compressibility;
+    const double warmer = std::fmin(kStep * t, kStep * p / tension);
+    const auto stretching = slope([&](double x) { return at_temperature_volume(t, x)->entropy; }, v,
+                                  squeeze, kRounding);
+    const auto pressing = slope([&](double x) { return at_temperature_volume(x, v)->pressure; }, t,
+                                warmer, kRounding * stiffness);
+    EXPECT_SAME_SLOPE(stretching, pressing);
+
+    // du = T ds - p dv: (dT/dv)_s = -(dp/ds)_v = -T (dp/du)_v
+    const auto squeezing =
+        slope([&](double x) { return at_pressure_entropy(x, s)->volume; }, p, kStep * p, kRounding);
+    const double u = state.enthalpy - p * v;
+    const auto boosting = slope([&](double x) { return at_volume_internal_energy(v, x)->pressure; },
+                                u, at.isochoric_heat_capacity * warmer, kRounding * stiffness);
+    const double left = warming.value / squeezing.value;
+    const double right = -t * boosting.value;
+    const double doubt = std::abs(left) * (warming.error / std::abs(warming.value) +
+                                           squeezing.error / std::abs(squeezing.value)) +
+                         t * boosting.error;
+    EXPECT_NEAR(left, right, 4 * doubt + 1e-9 * std::abs(left)) << "p " << p << ", T " << t;
+  }
+  for (const int region : {1, 2, 3, 5}) EXPECT_GT(seen[region], 100) << region;
+}
+
 // Clapeyron: dp/dT = (s'' - s') / (v'' - v') along the saturation line, and equal Gibbs energies.
 // Equation 30 is a fit of its own: R7-97(2012), figure 6 (from memory), states 0.025 % for its
-// pressure, and by so much pressure times v'' - v' the Gibbs energies may differ.
+// pressure, and by so much pressure times v'' - v' the Gibbs energies may differ. In the last
+// kelvin below the critical point both sides of the fraction vanish.
 TEST(Response, ClapeyronAlongTheSaturationLine) {
-  for (double t = 274; t < 640; t += 1) {
+  Sampler sampler(43);
+  for (int k = 0; k < 2000; ++k) {
+    const double t = k % 4 == 0 ? sampler.between(kTemperature13, 646)
+                                : sampler.between(kLowestTemperature + 0.1, kTemperature13);
     const double p = *saturation_pressure(t);
     const auto line =
         slope([](double x) { return saturation_pressure_equation(x); }, t, 0.01, kRounding);
