@@ -4,6 +4,8 @@ verdict table and leaves it as PDF and PNG.
 
     report.py busbar.oxt workbook.ods FOLDER
 
+A workbook without a verdict table is only drawn.
+
 Ends with 0 when every verdict was worked out, whatever the verdicts are; with 1 when a cell of the
 table failed or a file was not written; with 2 when the extension could not be installed.
 """
@@ -91,7 +93,8 @@ def draw(document, folder, name):
 def report(document, workbook, folder):
     """Prints and draws; the number of faults."""
     document.recalculate()
-    rows, faults = read_table(document)
+    judged = document.model.NamedRanges.hasByName(TABLE)
+    rows, faults = read_table(document) if judged else ([], [])
     width = shutil.get_terminal_size((120, 40)).columns
     if rows:
         print("\n".join(aligned(rows, max(60, min(width, 160)))))

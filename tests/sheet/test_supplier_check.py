@@ -1,17 +1,13 @@
 """The sample workbook supplier-check.ods: what it finds, and that it finds it by formulas."""
 
-import importlib
-import os
 import shutil
-import sys
 import zipfile
 from xml.etree import ElementTree
 
 from harness.case import SheetCase
+from harness.workbook import Workbook, builder, cells, line, names_of, sample
 
-ROOT = os.path.dirname(os.path.dirname(os.path.dirname(os.path.abspath(__file__))))
-BUILDER = os.path.join(ROOT, "sample-sheets", "builder")
-WORKBOOK = os.path.join(ROOT, "sample-sheets", "supplier-check.ods")
+WORKBOOK = sample("supplier-check.ods")
 
 IMPOSSIBLE, OPEN, CONSISTENT = "impossible", "not shown impossible", "consistent"
 
@@ -39,59 +35,17 @@ NAMESPACES = {
 }
 
 
-def builder(name):
-    """A module of the builder; it shares the names of its files with nobody."""
-    if BUILDER not in sys.path:
-        sys.path.insert(0, BUILDER)
-    return importlib.import_module(name)
-
-
-class Workbook:
+class SupplierCheck(Workbook):
     """A supplier check, by the names of its cells."""
-
-    def __init__(self, document):
-        self.document = document
-        self._names = document.model.NamedRanges
-
-    def cell(self, name):
-        return self._names.getByName(name).getReferredCells().getCellByPosition(0, 0)
-
-    def value(self, name):
-        cell = self.cell(name)
-        assert cell.getError() == 0, f"{name} shows {cell.getString()}"
-        return cell.getValue()
-
-    def text(self, name):
-        return self.cell(name).getString()
-
-    def set(self, name, content):
-        cell = self.cell(name)
-        if content is None:
-            cell.setFormula("")
-        elif isinstance(content, str):
-            cell.setString(content)
-        else:
-            cell.setValue(content)
-        return self
 
     def verdicts(self):
         return {key: self.text(f"verdict_{key}") for key in PLANTED}
 
     def reason(self, key):
         """The reason beside a claim in the table of the first sheet."""
-        area = self._names.getByName("verdict_table").getReferredCells()
+        area = self.names.getByName("verdict_table").getReferredCells()
         row = 1 + list(PLANTED).index(key)
         return area.getCellByPosition(area.Columns.Count - 1, row).getString()
-
-
-def cells(sheet):
-    """Yields every cell of the used area of a sheet."""
-    cursor = sheet.createCursor()
-    cursor.gotoEndOfUsedArea(False)
-    end = cursor.RangeAddress
-    for row in range(end.EndRow + 1):
-        for column in range(end.EndColumn + 1):
-            yield row, column, sheet.getCellByPosition(column, row)
 
 
 class SupplierCheckCase(SheetCase):
@@ -100,7 +54,7 @@ class SupplierCheckCase(SheetCase):
         self.empty = self.document
         self.document = self.office.load(shutil.copy(WORKBOOK, self.folder))
         self.addCleanup(self._close_empty)
-        self.workbook = Workbook(self.document)
+        self.workbook = SupplierCheck(self.document)
 
     def _close_empty(self):
         if self.office.alive():
@@ -432,18 +386,6 @@ class TestBuilder(SupplierCheckCase):
         # ISO 216: A4 is 210 mm by 297 mm, here on its side.
         self.assertAlmostEqual(width / report.DOTS_PER_INCH * 25.4, 297, delta=1)
         self.assertAlmostEqual(height / report.DOTS_PER_INCH * 25.4, 210, delta=1)
-
-
-def line(cell):
-    """Formula, shown text where it is a text, style, number."""
-    text = cell.getString() if cell.getValue() == 0 else ""
-    # Last digits in the exact tail of a stream may differ between processors' mathematics.
-    return cell.FormulaLocal, text.partition(" [1 ")[0], cell.CellStyle, cell.getValue()
-
-
-def names_of(document):
-    ranges = document.model.NamedRanges
-    return {name: ranges.getByName(name).getContent() for name in ranges.ElementNames}
 
 
 def stored_texts(path, sheet):
