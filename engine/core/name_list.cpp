@@ -12,6 +12,9 @@ namespace {
 constexpr std::size_t kLongestWord = 80;
 constexpr std::size_t kNearNames = 3;
 
+// A sentence about it must stay readable: no further name beyond this length.
+constexpr std::size_t kLongestReason = 140;
+
 std::string small_letters(std::string_view text) {
   std::string out(trimmed(text.substr(0, std::min(text.size(), kLongestWord))));
   for (char& c : out) {
@@ -56,16 +59,18 @@ NameList::NameList(std::vector<std::string_view> names, std::string_view where,
     std::string& reason = reasons_.emplace_back("is not a name in ");
     reason += where;
     reason += "; the nearest are ";
-    const std::vector<std::size_t> near = nearest(name, kNearNames);
-    for (std::size_t i = 0; i < near.size(); ++i) {
-      if (i > 0) reason += i + 1 < near.size() ? ", " : " and ";
+    bool first = true;
+    for (const std::size_t near : nearest(name, kNearNames)) {
+      if (!first && reason.size() + names_[near].size() > kLongestReason) break;
+      if (!first) reason += ", ";
+      first = false;
       reason += '"';
-      reason += names_[near[i]];
+      reason += names_[near];
       reason += '"';
     }
     reason += "; ";
     reason += all;
-    reason += " lists them all";
+    reason += " lists them";
   }
 }
 

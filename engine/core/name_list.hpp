@@ -24,7 +24,7 @@ class NameList {
   /// The places of the names that are most like the word, the nearest first.
   [[nodiscard]] std::vector<std::size_t> nearest(std::string_view word, std::size_t count) const;
 
-  /// A reason that names the nearest name and the two that are most like that one.
+  /// A reason that names the nearest name and one or two that are most like that one.
   [[nodiscard]] const char* unknown(std::string_view word) const;
 
  private:

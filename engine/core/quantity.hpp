@@ -48,6 +48,9 @@ enum class Quantity : std::uint8_t {
   flux_density,            ///< T
   frequency,               ///< Hz
   rotational_speed,        ///< turns per second, 1/s
+  emission_factor,         ///< mass that is emitted per fuel energy, kg/J
+  gas_per_energy,          ///< volume of gas per fuel energy at stated reference conditions, m3/J
+  mass_concentration,      ///< mass in a volume of gas at stated conditions, kg/m3
   same_unit,               ///< any unit; the result of the function is in the same one
   count_
 };
@@ -98,6 +101,9 @@ using MagneticFlux = Of<Quantity::magnetic_flux>;
 using FluxDensity = Of<Quantity::flux_density>;
 using Frequency = Of<Quantity::frequency>;
 using RotationalSpeed = Of<Quantity::rotational_speed>;
+using EmissionFactor = Of<Quantity::emission_factor>;
+using GasPerEnergy = Of<Quantity::gas_per_energy>;
+using MassConcentration = Of<Quantity::mass_concentration>;
 using SameUnit = Of<Quantity::same_unit>;
 
 }  // namespace busbar

@@ -83,6 +83,12 @@ constexpr std::array<QuantityUnits, kQuantities> kTable{{
     {"magnetic flux density", {{{"T", 1, 1, 0}, {"T", 1, 1, 0}, {"T", 1, 1, 0}}}},
     {"frequency", {{{"Hz", 1, 1, 0}, {"Hz", 1, 1, 0}, {"Hz", 1, 1, 0}}}},
     {"rotational speed", {{{"rpm", 1, 60, 0}, {"rpm", 1, 60, 0}, {"1/s", 1, 1, 0}}}},
+    {"emission factor",
+     {{{"kg/GJ", 1, 1e9, 0}, {"lb/MMBtu", kPound, 1e6 * kBtu, 0}, {"kg/J", 1, 1, 0}}}},
+    {"gas volume per energy",
+     {{{"m³/GJ", 1, 1e9, 0}, {"ft³/MMBtu", kCubicFoot, 1e6 * kBtu, 0}, {"m³/J", 1, 1, 0}}}},
+    {"mass concentration",
+     {{{"mg/m³", 1, 1e6, 0}, {"lb/ft³", kPound / kCubicFoot, 1, 0}, {"kg/m³", 1, 1, 0}}}},
     {"amount", {kOne, kOne, kOne}},
 }};
 

@@ -44,6 +44,8 @@ std::vector<const Row*> gather() {
            gaseous_fuels(),
            gaseous_fuel_tables(),
            gaseous_fuel_data(),
+           emission_factors(),
+           emissions(),
        }) {
     for (const Row& row : chapter) rows.push_back(&row);
   }

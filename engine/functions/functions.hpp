@@ -30,6 +30,8 @@ std::span<const Row> boiler_losses();
 std::span<const Row> gaseous_fuels();
 std::span<const Row> gaseous_fuel_tables();
 std::span<const Row> gaseous_fuel_data();
+std::span<const Row> emission_factors();
+std::span<const Row> emissions();
 
 /// All rows in the order of the chapters above.
 std::span<const Row* const> all();

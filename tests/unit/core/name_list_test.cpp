@@ -30,7 +30,7 @@ TEST(NameList, NamesTheNearest) {
   const std::string reason = fuels().unknown("coal");
   EXPECT_EQ(reason.find("is not a name in this table; the nearest are \"Coking Coal\", "), 0U)
       << reason;
-  EXPECT_NE(reason.find("TABLE(\"all\") lists them all"), std::string::npos);
+  EXPECT_NE(reason.find("TABLE(\"all\") lists them"), std::string::npos);
 }
 
 TEST(NameList, SurvivesAnyWord) {
