@@ -143,6 +143,14 @@ struct Typed<Word> {
   static Word take(const Slot& slot) { return slot.word(); }
 };
 
+template <>
+struct Typed<std::optional<Word>> {
+  static constexpr Type type{Kind::word, Quantity::number, true};
+  static std::optional<Word> take(const Slot& slot) {
+    return slot.given ? std::optional<Word>{slot.word()} : std::nullopt;
+  }
+};
+
 template <Quantity Q>
 struct Typed<Numbers<Of<Q>>> {
   static constexpr Type type{Kind::numbers, Q, false};

@@ -1,0 +1,21 @@
+// Constants and limits of the humid-air model, in SI.
+#pragma once
+
+namespace busbar::air {
+
+// IAPWS G11-15, Guideline on a Virial Equation for the Fugacity of H2O in Humid Air; the molar
+// masses are those of IAPWS G8-10 (dry air of CIPM-2007 with 400 ppm of CO2).
+inline constexpr double kGasConstant = 8.314462;        ///< J/(mol K)
+inline constexpr double kAirMolarMass = 0.02896546;     ///< kg/mol
+inline constexpr double kWaterMolarMass = 0.018015268;  ///< kg/mol
+inline constexpr double kMassRatio = kWaterMolarMass / kAirMolarMass;
+
+// The cross virials of G11-15 hold from -80 to 200 °C, the fugacity up to 5 MPa.
+inline constexpr double kColdest = 193.15;       ///< K
+inline constexpr double kHottest = 473.15;       ///< K
+inline constexpr double kHighestPressure = 5e6;  ///< Pa
+
+/// From here on saturation is over liquid water; below, over ice or supercooled water.
+inline constexpr double kFreezing = 273.15;  ///< K
+
+}  // namespace busbar::air
