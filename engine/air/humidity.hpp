@@ -32,8 +32,8 @@ Outcome<double> humidity_ratio_at_wet_bulb(double pressure, double temperature, 
 Outcome<double> wet_bulb(double pressure, double temperature, double humidity_ratio);
 
 /// Nothing when air of this humidity can exist as a gas: saturated over liquid water at the most,
-/// below 0 °C supercooled, or over the phase that is named. Else the failure `impossible`,
-/// argument 3.
+/// below 0 °C supercooled, or over the phase that is named, with the 3e-4 by which published models
+/// differ. Else the failure `impossible`, argument 3.
 Failure not_above_saturation(const Place& at, double humidity_ratio);
 Failure not_above_saturation(const Place& at, double humidity_ratio, Condensate phase);
 

@@ -139,9 +139,12 @@ TEST(Humidity, FogIsRefused) {
   const double most =
       *humidity_ratio_at_relative_humidity(kAtmosphere, 300, 1, BelowFreezing::unsaid);
   EXPECT_TRUE(enthalpy_at(kAtmosphere, 300, most));
+  // As far above as other published models put saturation, it counts as saturated.
+  EXPECT_EQ(*relative_humidity(kAtmosphere, 300, most * 1.00013, BelowFreezing::unsaid), 1);
+  EXPECT_NEAR(*wet_bulb(kAtmosphere, 300, most * 1.00013), 300, 0.01);
   for (const auto& refused :
-       {enthalpy_at(kAtmosphere, 300, most * 1.0001), wet_bulb(kAtmosphere, 300, most * 1.0001),
-        relative_humidity(kAtmosphere, 300, most * 1.0001, BelowFreezing::unsaid)}) {
+       {enthalpy_at(kAtmosphere, 300, most * 1.001), wet_bulb(kAtmosphere, 300, most * 1.001),
+        relative_humidity(kAtmosphere, 300, most * 1.001, BelowFreezing::unsaid)}) {
     ASSERT_FALSE(refused);
     EXPECT_EQ(refused.failure().fault, Fault::impossible);
     EXPECT_EQ(refused.failure().argument, 3);
