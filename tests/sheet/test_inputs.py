@@ -15,7 +15,8 @@ from catalogue import engine
 from harness.case import SheetCase
 from harness.office import shown_error
 
-GOOD_OPTIONS = {catalogue.NUMBER: "55", catalogue.OPTIONS: '"metric"'}
+# The one optional word so far is what the air is saturated over below 0 °C.
+GOOD_OPTIONS = {catalogue.NUMBER: "55", catalogue.WORD: '"ice"', catalogue.OPTIONS: '"metric"'}
 
 # Cells that every test of the grid finds.
 INPUTS = {
