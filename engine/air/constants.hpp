@@ -10,12 +10,13 @@ inline constexpr double kAirMolarMass = 0.02896546;     ///< kg/mol
 inline constexpr double kWaterMolarMass = 0.018015268;  ///< kg/mol
 inline constexpr double kMassRatio = kWaterMolarMass / kAirMolarMass;
 
-// The cross virials of G11-15 hold from -80 to 200 °C, the fugacity up to 5 MPa.
-inline constexpr double kColdest = 193.15;       ///< K
-inline constexpr double kHottest = 473.15;       ///< K
-inline constexpr double kHighestPressure = 5e6;  ///< Pa
-
 /// From here on saturation is over liquid water; below, over ice or supercooled water.
 inline constexpr double kFreezing = 273.15;  ///< K
+
+// The cross virials of G11-15 hold from -80 to 200 °C, the fugacity up to 5 MPa. Written so that
+// -80 °C itself is inside.
+inline constexpr double kColdest = kFreezing - 80;   ///< K
+inline constexpr double kHottest = kFreezing + 200;  ///< K
+inline constexpr double kHighestPressure = 5e6;      ///< Pa
 
 }  // namespace busbar::air

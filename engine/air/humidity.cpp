@@ -30,6 +30,14 @@ Outcome<Saturation> saturation_of(const Place& at, BelowFreezing below, std::uin
   return saturation(at, *phase);
 }
 
+// Whether the dew point is 0 °C or more. The enhancement factor is below 2 in the range, so that
+// moist air needs no saturation.
+bool holds_more_than_ice_water(const Place& freezing, double x) {
+  if (x * freezing.pressure > 2 * vapour_pressure(kFreezing, Condensate::water)) return true;
+  const auto over_water = saturation(freezing, Condensate::water);
+  return over_water && x >= over_water->mole_fraction;
+}
+
 }  // namespace
 
 Failure not_above_saturation(const Place& at, double humidity_ratio) {
@@ -77,8 +85,7 @@ Outcome<double> humidity_ratio_at_dew_point(double pressure, double dew_point,
 Outcome<double> dew_point(double pressure, double humidity_ratio, BelowFreezing below) {
   const double x = mole_fraction(humidity_ratio);
   const Place freezing = place(pressure, kFreezing);
-  const auto over_water = saturation(freezing, Condensate::water);
-  if (over_water && x >= over_water->mole_fraction) {
+  if (holds_more_than_ice_water(freezing, x)) {
     const double high = std::min(kHottest, boiling_temperature(pressure));
     return saturation_temperature(pressure, x, Condensate::water, kFreezing, high);
   }

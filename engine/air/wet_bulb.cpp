@@ -70,7 +70,11 @@ Outcome<double> wet_bulb(double pressure, double temperature, double humidity_ra
 
   Condensate phase = Condensate::ice;
   Search search;
-  if (high >= kFreezing) {
+  // Where the dew point is above 0 °C the wet bulb is so too: the enhancement factor is below 2.
+  const double partial = mole_fraction(humidity_ratio) * pressure;
+  if (partial > 2 * vapour_pressure(kFreezing, Condensate::water)) {
+    phase = Condensate::water;
+  } else if (high >= kFreezing) {
     const auto liquid = balance.at(kFreezing, Condensate::water);
     if (liquid && *liquid >= 0) phase = Condensate::water;
   }

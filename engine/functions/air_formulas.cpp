@@ -69,14 +69,14 @@ constexpr Source kStandardAtmosphere{"ISO 2533, Standard Atmosphere", "1975",
 constexpr const char* kHandbookLimit = "the limit of the vapour pressure equations";
 constexpr Argument kAnyPressure{"pressure", "Absolute pressure of the air, never gauge", kAboveZero,
                                 100e6};
-constexpr Argument kAnyTemperature{"temperature", "Dry-bulb temperature", 173.15, 473.15,
-                                   kHandbookLimit};
+constexpr Argument kAnyTemperature{"temperature", "Dry-bulb temperature", air::kFreezing - 100,
+                                   air::kHottest, kHandbookLimit};
 constexpr Argument kEnthalpy[] = {kAnyTemperature, kHumidityRatio};
 constexpr Argument kRelative[] = {kAnyPressure, kAnyTemperature, kRelativeHumidity};
 constexpr Argument kWet[] = {kAnyPressure,
                              kAnyTemperature,
                              {"wet bulb", "Wet-bulb temperature; below 0 °C with ice on the bulb",
-                              173.15, 473.15, kHandbookLimit}};
+                              air::kFreezing - 100, air::kHottest, kHandbookLimit}};
 constexpr Argument kMetrology[] = {
     {"pressure", "Absolute pressure of the air", 60e3, 110e3, "the limit of CIPM-2007"},
     {"temperature", "Temperature of the air", 288.15, 300.15, "the limit of CIPM-2007"},
