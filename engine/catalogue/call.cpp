@@ -93,6 +93,7 @@ class Caller {
     const Measure given{static_cast<double>(arguments_.size()), Quantity::number};
     const char* reason = "takes {0} arguments at the most; {1} were given";
     if (row_.argument_count() == 1) reason = "takes one argument; {1} were given";
+    if (row_.argument_count() == 0) reason = "takes no arguments; {1} were given";
     if (takes_whole_range()) reason = "takes one range, not a list of {1} arguments";
     return {{Fault::wrong_shape, 0, reason, {{most, given}}}, {}};
   }

@@ -327,7 +327,8 @@ struct Bind<Kernel> {
     }
   }
 
-  static Failure thunk(const Slot* in, UnitSet units, Result& out) {
+  static Failure thunk([[maybe_unused]] const Slot* in, [[maybe_unused]] UnitSet units,
+                       Result& out) {
     return [&]<std::size_t... I>(std::index_sequence<I...>) {
       Outcome<R> outcome = Kernel(take<A>(in[I], units)...);
       if (outcome) Typed<R>::give(std::move(*outcome), out);
@@ -359,13 +360,13 @@ struct BindBatch<Kernel, BatchKernel> {
 };
 
 template <auto Kernel, std::size_t N>
-constexpr Row checked_row(const Words& words, const Argument (&arguments)[N], Explain explain,
-                          Batch batch) {
+constexpr Row checked_row(const Words& words, std::span<const Argument, N> arguments,
+                          Explain explain, Batch batch) {
   using Bound = detail::Bind<Kernel>;
   static_assert(N == Bound::kCount, "one Argument for each parameter of the kernel");
   static_assert(N < kMostArguments, "more arguments than a call can hold");
   bool optional_seen = false;
-  for (std::size_t i = 0; i < N; ++i) {
+  for (std::size_t i = 0; i < arguments.size(); ++i) {
     if (optional_seen && !Bound::kAll[i].optional) {
       throw "an optional argument stands before a required one";
     }
@@ -392,14 +393,21 @@ constexpr Row checked_row(const Words& words, const Argument (&arguments)[N], Ex
 /// Binds a kernel to its words. What does not fit does not compile.
 template <auto Kernel, std::size_t N>
 consteval Row row(const Words& words, const Argument (&arguments)[N], Explain explain = nullptr) {
-  return detail::checked_row<Kernel>(words, arguments, explain, nullptr);
+  return detail::checked_row<Kernel>(words, std::span<const Argument, N>(arguments), explain,
+                                     nullptr);
+}
+
+/// A function without arguments.
+template <auto Kernel>
+consteval Row row(const Words& words) {
+  return detail::checked_row<Kernel>(words, std::span<const Argument, 0>{}, nullptr, nullptr);
 }
 
 /// The same with a batch kernel for calls over ranges: void(Column<A>..., Answers<R>, count).
 template <auto Kernel, auto BatchKernel, std::size_t N>
 consteval Row row_with_batch(const Words& words, const Argument (&arguments)[N],
                              Explain explain = nullptr) {
-  return detail::checked_row<Kernel>(words, arguments, explain,
+  return detail::checked_row<Kernel>(words, std::span<const Argument, N>(arguments), explain,
                                      &detail::BindBatch<Kernel, BatchKernel>::batch);
 }
 

@@ -30,7 +30,10 @@ Outcome<Text> published_source(Word name) {
   return Text{source_text(*row)};
 }
 
+Outcome<Text> engine_version() { return Text{"Busbar " BUSBAR_VERSION}; }
+
 constexpr const char* kChapter = "Explanation";
+constexpr Source kVersion{"Busbar", "this library", "its own version"};
 constexpr Source kOwn{"Busbar", "this catalogue", "explains calls; computes nothing itself"};
 
 constexpr Argument kCell[] = {{"cell", "A reference to the cell that is to be explained"}};
@@ -69,6 +72,15 @@ constexpr Row kRows[] = {
                            {"PUBLISHED_SOURCE(\"STEAM\")", "IAPWS R7-97(2012)"},
                            kFirst},
                           kName),
+    row<engine_version>({"ENGINE_VERSION",
+                         kChapter,
+                         "The version of the engine that computes this sheet",
+                         "For the head of a printed sheet: a figure and what worked it out belong "
+                         "together.",
+                         "A text",
+                         kVersion,
+                         {"ENGINE_VERSION()", "Busbar 0.1.0"},
+                         kFirst}),
 };
 
 }  // namespace

@@ -1,20 +1,10 @@
 """The workbook steam-process.ods: an invented turbine test on an h-s and a T-s diagram."""
 
-import os
-import re
-
 from steam_process import balance, cycle, evidence, figures, inputs, points, process
 from styles import Styles, set_up_page
 
 FILE = "steam-process.ods"
 FOOTER = "For appraisal only; never for the setting of safety devices. Local codes and licensed practice govern."
-
-
-def version():
-    """The version of this tree."""
-    top = os.path.dirname(os.path.dirname(os.path.dirname(os.path.dirname(os.path.abspath(__file__)))))
-    with open(os.path.join(top, "CMakeLists.txt"), encoding="utf-8") as file:
-        return re.search(r"project\(\s*busbar\s+VERSION\s+([\d.]+)", file.read(), re.IGNORECASE).group(1)
 
 
 def build(document):
@@ -28,7 +18,7 @@ def build(document):
         document.add_sheet(module.NAME)
     styles = Styles(model)
 
-    front = process.Process(document, styles, version())
+    front = process.Process(document, styles)
     second = cycle.Cycle(document, styles)
     heat = balance.Balance(document, styles)
     register = inputs.Inputs(document, styles)

@@ -17,9 +17,8 @@ CAUTION = (
 
 
 class Process:
-    def __init__(self, document, styles, version):
+    def __init__(self, document, styles):
         self.page = Page(document, styles, NAME)
-        self.version = version
 
     def build(self):
         page = self.page
@@ -39,7 +38,7 @@ class Process:
             page.put(f"A{row}", label, "label")
             page.put(f"B{row}", text, "input left", name=name, merge=f"F{row}")
         page.put("H3", "Engine", "label")
-        page.put("I3", f"Busbar {self.version}; IAPWS-IF97", "result text", name="engine_version")
+        page.put("I3", '=ENGINE_VERSION()&"; IAPWS-IF97"', "result text", name="engine_version")
         page.put("H4", "Data", "label")
         page.put("I4", "Site, documents and every figure are invented.", "result text")
         page.put(

@@ -93,9 +93,9 @@ class Verdicts:
         )
         page.put(
             "B7",
-            "Site, supplier, document and every figure are invented. Where a cell shows #NAME?, or nothing "
-            "moves when an input changes, the Busbar extension is missing: install it, then press "
-            "Ctrl+Shift+F9.",
+            '="Worked out by "&ENGINE_VERSION()&". Site, supplier, document and every figure are invented. '
+            "Where a cell shows #NAME?, or nothing moves when an input changes, the Busbar extension is "
+            'missing: install it, then press Ctrl+Shift+F9."',
             "note",
             merge="I7",
         )

@@ -229,7 +229,7 @@ TEST_P(BadInput, TooFewAndTooManyArgumentsAreCounted) {
     for (std::size_t k = 0; k < i; ++k) cut.emplace_back(good[k]);
     EXPECT_EQ(sample::call(row(), cut).error_at(), BUSBAR_ERROR_MISSING) << row().words.name;
   }
-  const bool takes_more = row().types.back().kind == Kind::rest;
+  const bool takes_more = !row().types.empty() && row().types.back().kind == Kind::rest;
   for (std::size_t extra : {std::size_t{1}, std::size_t{5}, std::size_t{200}}) {
     std::vector<support::Argument> given;
     const Value one = Value::number(1);

@@ -33,6 +33,7 @@ inline std::vector<std::string> argument_formulas(const Row& row) {
     }
     parts.back() += c;
   }
+  if (parts.size() == 1 && parts.front().empty()) parts.clear();
   return parts;
 }
 
