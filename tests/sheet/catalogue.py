@@ -30,6 +30,8 @@ class Argument:
     def limit_texts(self, unit_set="metric"):
         """(low, high, unit) as the catalogue prints them, "" where there is no limit."""
         unit, _, text = self.ranges[unit_set].partition(", ")
+        if re.match(r"above |from |up to |-?\d", unit):  # a plain number has no unit before its range
+            unit, text = "", self.ranges[unit_set]
         low = re.match(r"(?:above |from )?(-?[\d.]+)", text)
         high = re.search(r"to (-?[\d.]+)$", text)
         return (
@@ -41,7 +43,7 @@ class Argument:
     def limits(self, unit_set="metric"):
         """(low, high, low itself is allowed) of a number; infinities where there is no limit."""
         low, high, _ = self.limit_texts(unit_set)
-        return float(low or "-inf"), float(high or "inf"), ", above " not in self.ranges[unit_set]
+        return float(low or "-inf"), float(high or "inf"), not re.search(r"(^|, )above ", self.ranges[unit_set])
 
     def takes(self, number, unit_set="metric"):
         low, high, closed = self.limits(unit_set)

@@ -117,7 +117,7 @@ class Inputs(SheetCase):
             self.assertNotIn(unwanted, why, case.formula)
         if shown != WORKS:
             for word in case.words:
-                self.assertIn(word.replace("HERE", here), why, case.formula)
+                self.assertIn(re.sub(r"\bHERE\b", here, word), why, case.formula)
 
     def expectation(self, function, argument, name):
         """(errors that may be shown, words that WHY must hold if one is shown)"""
