@@ -181,7 +181,7 @@ Trouble read_cell(const Row& row, std::size_t index, const Cell& cell, UnitSet u
       return read_word(index, cell, slot);
     case Kind::composition: {
       GivenComposition& given = composition_of(index, space, slot);
-      return read_composition_cell(index, cell, row.types[index].gas, given);
+      return read_composition_cell(index, cell, row.types[index].use, given);
     }
     default:
       return {};
@@ -192,7 +192,7 @@ Trouble read_range(const Row& row, std::size_t index, const Grid& grid, UnitSet 
                    Workspace& space, Slot& slot) {
   slot.given = true;
   if (row.types[index].kind == Kind::composition) {
-    return read_composition_table(index, grid, row.types[index].gas,
+    return read_composition_table(index, grid, row.types[index].use,
                                   composition_of(index, space, slot));
   }
   const std::size_t cells = grid.rows() * grid.columns();

@@ -1,10 +1,12 @@
 #include "catalogue/composition.hpp"
 
 #include <cmath>
+#include <vector>
 
 #include "catalogue/arguments.hpp"
 #include "catalogue/sentence.hpp"
 #include "core/text.hpp"
+#include "fuel/solid/state.hpp"
 #include "gas/published.hpp"
 
 namespace busbar {
@@ -56,8 +58,34 @@ Trouble inner_error(std::size_t index, const Error& error) {
                  inner.row != nullptr ? sentence(inner) : std::string{});
 }
 
-Trouble resolved(std::size_t index, bool as_gas, GivenComposition& given) {
-  if (!as_gas) return {};
+// The text behind basis and scale, which only the analysis of a fuel has.
+Trouble as_analysis(std::size_t index, std::string_view state, GivenComposition& given) {
+  if (given.composition.basis != Basis::mass) {
+    return trouble(Fault::wrong_kind, index,
+                   "is by mole: the analysis of a fuel is by mass, such as \"mass % dry\"");
+  }
+  const auto named = fuel::solid::state_named(state);
+  if (!named) {
+    const bool none = state.empty();
+    return trouble(none ? Fault::missing : Fault::unknown_word, index,
+                   none ? "states no basis of the fuel: write \"mass % as received\", \"mass % "
+                          "air-dried\", \"mass % dry\" or \"mass % daf\""
+                        : fuel::solid::kUnknownState,
+                   quotable(state));
+  }
+  std::vector<fuel::solid::Entry> entries;
+  entries.reserve(given.composition.parts.size());
+  for (const Part& part : given.composition.parts) entries.push_back({part.name, part.amount});
+  const Outcome<fuel::solid::Analysis> analysis = fuel::solid::read(*named, entries);
+  if (!analysis) return placed(analysis.failure().about(position(index)), given);
+  given.analysis = *analysis;
+  return {};
+}
+
+Trouble resolved(std::size_t index, CompositionUse use, std::string_view state,
+                 GivenComposition& given) {
+  if (use == CompositionUse::fuel) return as_analysis(index, state, given);
+  if (use != CompositionUse::gas) return {};
   const Outcome<gas::Mixture> mixture = gas::Mixture::from(given.composition);
   if (!mixture) return placed(mixture.failure().about(position(index)), given);
   given.mixture = *mixture;
@@ -65,13 +93,15 @@ Trouble resolved(std::size_t index, bool as_gas, GivenComposition& given) {
 }
 
 // The heading over the amounts.
-Trouble read_table_heading(std::size_t index, const Lines& lines, Heading& heading) {
+Trouble read_table_heading(std::size_t index, const Lines& lines, CompositionUse use,
+                           Heading& heading, std::string_view& state) {
   const Cell& cell = lines.at(0, 1);
   if (const auto* error = std::get_if<Error>(&cell)) {
     return lines.found_at(inner_error(index, *error), 0, 1);
   }
   const std::string_view text = text_in(cell);
-  if (const auto read = read_heading(text)) {
+  const auto read = read_heading(text, state);
+  if (read && (state.empty() || use == CompositionUse::fuel)) {
     heading = *read;
     return {};
   }
@@ -162,7 +192,7 @@ Trouble read_line(std::size_t index, const Lines& lines, std::size_t line, const
 
 }  // namespace
 
-Trouble read_composition_cell(std::size_t index, const Cell& cell, bool as_gas,
+Trouble read_composition_cell(std::size_t index, const Cell& cell, CompositionUse use,
                               GivenComposition& given) {
   given.table = false;
   const auto* text = std::get_if<std::string>(&cell);
@@ -180,22 +210,24 @@ Trouble read_composition_cell(std::size_t index, const Cell& cell, bool as_gas,
     }
     return trouble(Fault::missing, index, text == nullptr ? "is blank" : "is empty");
   }
+  std::string_view state;
   if (const gas::PublishedMixture* mixture = gas::published_mixture(trimmed(*text))) {
     given.composition.basis = mixture->basis;
     given.composition.parts.assign(mixture->parts.begin(), mixture->parts.end());
-    return resolved(index, as_gas, given);
+    return resolved(index, use, state, given);
   }
   Trouble found;
-  Outcome<Composition> read = read_composition(*text, found.word);
+  Outcome<Composition> read =
+      read_composition(*text, found.word, use == CompositionUse::fuel ? &state : nullptr);
   if (!read) {
     found.failure = read.failure().about(position(index));
     return found;
   }
   given.composition = std::move(*read);
-  return resolved(index, as_gas, given);
+  return resolved(index, use, state, given);
 }
 
-Trouble read_composition_table(std::size_t index, const Grid& grid, bool as_gas,
+Trouble read_composition_table(std::size_t index, const Grid& grid, CompositionUse use,
                                GivenComposition& given) {
   // Columns unless the heading stands where that of rows would.
   const auto few = [](std::size_t count) { return count == 2 || count == 3; };
@@ -214,7 +246,8 @@ Trouble read_composition_table(std::size_t index, const Grid& grid, bool as_gas,
   given.table = true;
   given.horizontal = horizontal;
   Heading heading;
-  if (Trouble found = read_table_heading(index, lines, heading)) return found;
+  std::string_view state;
+  if (Trouble found = read_table_heading(index, lines, use, heading, state)) return found;
   if (Trouble found = read_uncertainty_heading(index, lines)) return found;
   given.composition.basis = heading.basis;
   std::size_t end = lines.count();
@@ -233,7 +266,7 @@ Trouble read_composition_table(std::size_t index, const Grid& grid, bool as_gas,
       return found;
     }
   }
-  return resolved(index, as_gas, given);
+  return resolved(index, use, state, given);
 }
 
 Trouble placed(const Failure& failure, const GivenComposition& given) {

@@ -47,7 +47,7 @@ struct Type {
   Kind kind = Kind::number;
   Quantity quantity = Quantity::number;
   bool optional = false;
-  bool gas = false;  ///< a composition whose parts are gas species
+  CompositionUse use = CompositionUse::parts;
 };
 
 struct ResultType {
@@ -181,8 +181,15 @@ struct Typed<Composition> {
 /// A composition of gas species that sums to 1.
 template <>
 struct Typed<gas::Mixture> {
-  static constexpr Type type{Kind::composition, Quantity::number, false, true};
+  static constexpr Type type{Kind::composition, Quantity::number, false, CompositionUse::gas};
   static const gas::Mixture& take(const Slot& slot) { return slot.composition().mixture; }
+};
+
+/// The analysis of a solid or liquid fuel, which closes and states its basis.
+template <>
+struct Typed<fuel::solid::Analysis> {
+  static constexpr Type type{Kind::composition, Quantity::number, false, CompositionUse::fuel};
+  static const fuel::solid::Analysis& take(const Slot& slot) { return slot.composition().analysis; }
 };
 
 template <>

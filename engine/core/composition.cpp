@@ -45,6 +45,14 @@ Failure check_signs(const Composition& composition) {
   return {};
 }
 
+// "[typical: beech] mass % dry: ..." without what stands in brackets.
+std::string_view without_remark(std::string_view text) {
+  text = trimmed(text);
+  if (text.empty() || text.front() != '[') return text;
+  const auto end = text.find(']');
+  return end == std::string_view::npos ? text : trimmed(text.substr(end + 1));
+}
+
 // "n-C4H10 0.03": the amount is what stands behind the last space.
 bool read_part(std::string_view text, Part& part) {
   text = trimmed(text);
@@ -63,6 +71,12 @@ double Composition::sum() const {
 }
 
 std::optional<Heading> read_heading(std::string_view text) {
+  std::string_view rest;
+  const std::optional<Heading> heading = read_heading(text, rest);
+  return rest.empty() ? heading : std::nullopt;
+}
+
+std::optional<Heading> read_heading(std::string_view text, std::string_view& rest) {
   text = trimmed(text);
   Heading heading;
   if (take(text, "mole") || take(text, "mol/mol") || take(text, "mol")) {
@@ -78,7 +92,7 @@ std::optional<Heading> read_heading(std::string_view text) {
   } else {
     take(text, "fraction");
   }
-  if (!text.empty()) return std::nullopt;
+  rest = text;
   return heading;
 }
 
@@ -91,7 +105,9 @@ const char* why_no_heading(std::string_view text) {
   return "states no basis: write \"mole\", \"mole %\", \"mass\" or \"mass %\"";
 }
 
-Outcome<Composition> read_composition(std::string_view text, std::string& word) {
+Outcome<Composition> read_composition(std::string_view text, std::string& word,
+                                      std::string_view* rest) {
+  text = without_remark(text);
   const auto colon = text.find(':');
   const auto refuse = [&](std::string_view what, const char* reason) {
     word = quotable(what);
@@ -102,8 +118,11 @@ Outcome<Composition> read_composition(std::string_view text, std::string& word) 
                   "is no composition: write \"mole: N2 0.79, O2 0.21\" with mole, mole %, mass or "
                   "mass %, or the name of a published mixture");
   }
-  const auto heading = read_heading(text.substr(0, colon));
-  if (!heading) return refuse(text.substr(0, colon), why_no_heading(text.substr(0, colon)));
+  std::string_view behind;
+  const auto heading = read_heading(text.substr(0, colon), behind);
+  if (rest != nullptr) *rest = behind;
+  if (!heading || (rest == nullptr && !behind.empty()))
+    return refuse(text.substr(0, colon), why_no_heading(text.substr(0, colon)));
   Composition composition;
   composition.basis = heading->basis;
   text.remove_prefix(colon + 1);

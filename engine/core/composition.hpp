@@ -40,6 +40,9 @@ struct Heading {
 /// mole, "weight" and "wt" for mass, "percent" or "-%" for %, capitals or not.
 std::optional<Heading> read_heading(std::string_view text);
 
+/// The same, with what stands behind the scale left in `rest`: "dry" of "mass % dry".
+std::optional<Heading> read_heading(std::string_view text, std::string_view& rest);
+
 /// A sentence fragment about a heading that is none: what was meant by "%" or "vol %" and what to
 /// write instead.
 const char* why_no_heading(std::string_view text);
@@ -48,8 +51,11 @@ const char* why_no_heading(std::string_view text);
 inline constexpr std::size_t kMostParts = 100;
 
 /// Reads the one text form, "mole: CH4 0.92, C2H6 0.05, N2 0.03" or "mass %: ...". On failure
-/// `word` is what was not understood. Argument 1. The names point into the text.
-Outcome<Composition> read_composition(std::string_view text, std::string& word);
+/// `word` is what was not understood. Argument 1. The names point into the text. A remark in
+/// brackets before the basis is left aside. Words behind the scale go to `rest`; without it they
+/// are refused.
+Outcome<Composition> read_composition(std::string_view text, std::string& word,
+                                      std::string_view* rest = nullptr);
 
 /// Appends the text form with fractions that read back exactly.
 void write_composition(std::string& out, const Composition& composition);

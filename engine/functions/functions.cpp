@@ -43,6 +43,8 @@ std::vector<const Row*> gather() {
            diagrams(),
            fuel_moisture(),
            fuel_library(),
+           solid_fuels(),
+           solid_fuel_heating_values(),
            boiler_losses(),
            gaseous_fuels(),
            gaseous_fuel_tables(),

@@ -29,6 +29,8 @@ std::span<const Row> gases();
 std::span<const Row> diagrams();
 std::span<const Row> fuel_moisture();
 std::span<const Row> fuel_library();
+std::span<const Row> solid_fuels();
+std::span<const Row> solid_fuel_heating_values();
 std::span<const Row> boiler_losses();
 std::span<const Row> gaseous_fuels();
 std::span<const Row> gaseous_fuel_tables();
