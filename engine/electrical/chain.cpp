@@ -16,7 +16,7 @@ Outcome<double> house_load(std::span<const double> shaft_powers,
   if (shaft_powers.size() != efficiencies.size()) {
     return Failure{Fault::wrong_shape,
                    2,
-                   "holds {0} numbers for {1} shaft powers",
+                   "has {0} for {1} shaft powers",
                    {{{static_cast<double>(efficiencies.size()), Quantity::number},
                      {static_cast<double>(shaft_powers.size()), Quantity::number}}}};
   }

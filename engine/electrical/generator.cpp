@@ -30,7 +30,7 @@ Outcome<Generator> generator(double apparent_power, double power_factor,
   if (losses.size() != loss_count) {
     return Failure{Fault::wrong_shape,
                    losses_at,
-                   "holds {0} numbers; six are needed, in the order friction and windage, core, "
+                   "needs six numbers and has {0}; their order is friction and windage, core, "
                    "stator copper, stray load, field copper, excitation",
                    {{{static_cast<double>(losses.size()), Quantity::number}}}};
   }

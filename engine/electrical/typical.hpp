@@ -10,6 +10,7 @@ namespace busbar::electrical {
 
 struct TypicalRange {
   std::string_view machine;
+  std::string_view size;
   double low = 0;   ///< at rated load, as a fraction
   double high = 0;  ///< likewise
 };
