@@ -17,10 +17,11 @@ sys.path[:0] = [HERE, os.path.join(os.path.dirname(SAMPLES), "tests", "sheet")]
 from harness.office import Document, Office  # noqa: E402
 from harness.profile import Profile  # noqa: E402
 
+import generator_losses  # noqa: E402
 import steam_process  # noqa: E402
 import supplier_check  # noqa: E402
 
-WORKBOOKS = (supplier_check, steam_process)
+WORKBOOKS = (supplier_check, steam_process, generator_losses)
 
 
 def shown(office):
