@@ -24,6 +24,7 @@ const NameList& names() {
   // Never destroyed: reasons of failures point into it.
   static const auto& list = *[] {
     std::vector<std::string_view> all;
+    all.reserve(kRanges.size());
     for (const TypicalRange& range : kRanges) all.push_back(range.machine);
     return new NameList(std::move(all), "this table", "TYPICAL_ELECTRICAL_EFFICIENCY(\"all\")");
   }();

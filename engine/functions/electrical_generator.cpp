@@ -12,9 +12,6 @@ namespace busbar::functions {
 namespace {
 
 using electrical::Balance;
-using electrical::Generator;
-using electrical::Load;
-using electrical::Losses;
 
 // Wide enough for every synchronous machine; at 1 the diagram has no reactance left.
 constexpr double kLeastFieldRatio = 0.01;

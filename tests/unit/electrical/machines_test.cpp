@@ -23,7 +23,8 @@ constexpr double kClosed = 1e-12;
 
 TEST(Poles, GoThereAndBackForEveryMachine) {
   for (const double frequency : {16.7, 50.0, 60.0, 400.0}) {
-    for (double poles = 2; poles <= kMostPoles; poles += 2) {
+    for (int pairs = 1; 2 * pairs <= static_cast<int>(kMostPoles); ++pairs) {
+      const double poles = 2.0 * pairs;
       const auto speed = synchronous_speed(frequency, poles);
       ASSERT_TRUE(speed);
       EXPECT_EQ(*pole_count(frequency, *speed), poles);
@@ -33,7 +34,7 @@ TEST(Poles, GoThereAndBackForEveryMachine) {
 }
 
 TEST(Poles, OfASpeedBetweenTwoMachinesAreRefused) {
-  for (double pairs = 1; pairs < 90; ++pairs) {
+  for (int pairs = 1; pairs < 90; ++pairs) {
     EXPECT_EQ(pole_count(50, 50 / (pairs + 0.5)).failure().fault, Fault::impossible) << pairs;
   }
   EXPECT_FALSE(pole_count(50, 5000));
@@ -47,7 +48,7 @@ TEST(WindingFactor, TendsToItsLimitWithManySlots) {
 }
 
 TEST(WindingFactor, ACoilTooLongIsAsGoodAsOneTooShort) {
-  for (double span = 1; span < 18; ++span) {
+  for (int span = 1; span < 18; ++span) {
     EXPECT_NEAR(*pitch_factor(36, 4, span), *pitch_factor(36, 4, 18 - span), kClosed);
   }
   EXPECT_NEAR(*winding_factor(36, 4, 3, 7),
