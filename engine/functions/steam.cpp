@@ -4,7 +4,9 @@
 #include "functions/functions.hpp"
 #include "functions/sources.hpp"
 #include "functions/steam_arguments.hpp"
+#include "water/batch/isobar.hpp"
 #include "water/batch/pressure_temperature.hpp"
+#include "water/batch/saturation.hpp"
 #include "water/state.hpp"
 #include "water/stream.hpp"
 
@@ -224,7 +226,8 @@ constexpr Row kRows[] = {
          kFirst},
         kPressureTemperature, explain_pressure_temperature),
 
-    row<at_ph<Temperature, &State::temperature>>(
+    row_with_batch<at_ph<Temperature, &State::temperature>,
+                   columns<Temperature, Pressure, Enthalpy, water::batch::temperature_at_enthalpy>>(
         {"STEAM_TEMPERATURE_AT_ENTHALPY",
          kChapter,
          "Temperature at a pressure and an enthalpy",
@@ -234,16 +237,19 @@ constexpr Row kRows[] = {
          {"STEAM_TEMPERATURE_AT_ENTHALPY(30; 500)", "118.641991"},
          kFirst},
         kPressureEnthalpy, explain_ph),
-    row<at_ph<Entropy, &State::entropy>>({"STEAM_ENTROPY_AT_ENTHALPY",
-                                          kChapter,
-                                          "Specific entropy at a pressure and an enthalpy",
-                                          kSeamNote,
-                                          "Specific entropy",
-                                          kSteamTables,
-                                          {"STEAM_ENTROPY_AT_ENTHALPY(30; 500)", "1.51061383"},
-                                          kFirst},
-                                         kPressureEnthalpy, explain_ph),
-    row<dryness_at_enthalpy>(
+    row_with_batch<at_ph<Entropy, &State::entropy>,
+                   columns<Entropy, Pressure, Enthalpy, water::batch::entropy_at_enthalpy>>(
+        {"STEAM_ENTROPY_AT_ENTHALPY",
+         kChapter,
+         "Specific entropy at a pressure and an enthalpy",
+         kSeamNote,
+         "Specific entropy",
+         kSteamTables,
+         {"STEAM_ENTROPY_AT_ENTHALPY(30; 500)", "1.51061383"},
+         kFirst},
+        kPressureEnthalpy, explain_ph),
+    row_with_batch<dryness_at_enthalpy,
+                   columns<Fraction, Pressure, Enthalpy, water::batch::dryness_at_enthalpy>>(
         {"STEAM_DRYNESS_AT_ENTHALPY",
          kChapter,
          "Dryness at a pressure and an enthalpy",
@@ -253,7 +259,8 @@ constexpr Row kRows[] = {
          {"STEAM_DRYNESS_AT_ENTHALPY(0.05; 2300)", "0.892379238"},
          kFirst},
         kPressureEnthalpy, explain_ph),
-    row<at_ps<Temperature, &State::temperature>>(
+    row_with_batch<at_ps<Temperature, &State::temperature>,
+                   columns<Temperature, Pressure, Entropy, water::batch::temperature_at_entropy>>(
         {"STEAM_TEMPERATURE_AT_ENTROPY",
          kChapter,
          "Temperature at a pressure and an entropy",
@@ -263,16 +270,19 @@ constexpr Row kRows[] = {
          {"STEAM_TEMPERATURE_AT_ENTROPY(30; 0.5)", "34.6953938"},
          kFirst},
         kPressureEntropy, explain_ps),
-    row<at_ps<Enthalpy, &State::enthalpy>>({"STEAM_ENTHALPY_AT_ENTROPY",
-                                            kChapter,
-                                            "Specific enthalpy at a pressure and an entropy",
-                                            kSeamNote,
-                                            "Specific enthalpy",
-                                            kSteamTables,
-                                            {"STEAM_ENTHALPY_AT_ENTROPY(0.05; 6.8)", "2072.98783"},
-                                            kFirst},
-                                           kPressureEntropy, explain_ps),
-    row<dryness_at_entropy>(
+    row_with_batch<at_ps<Enthalpy, &State::enthalpy>,
+                   columns<Enthalpy, Pressure, Entropy, water::batch::enthalpy_at_entropy>>(
+        {"STEAM_ENTHALPY_AT_ENTROPY",
+         kChapter,
+         "Specific enthalpy at a pressure and an entropy",
+         kSeamNote,
+         "Specific enthalpy",
+         kSteamTables,
+         {"STEAM_ENTHALPY_AT_ENTROPY(0.05; 6.8)", "2072.98783"},
+         kFirst},
+        kPressureEntropy, explain_ps),
+    row_with_batch<dryness_at_entropy,
+                   columns<Fraction, Pressure, Entropy, water::batch::dryness_at_entropy>>(
         {"STEAM_DRYNESS_AT_ENTROPY",
          kChapter,
          "Dryness at a pressure and an entropy",
@@ -283,24 +293,28 @@ constexpr Row kRows[] = {
          kFirst},
         kPressureEntropy, explain_ps),
 
-    row<saturation_temperature>({"SATURATION_TEMPERATURE",
-                                 kChapter,
-                                 "Boiling temperature at a pressure",
-                                 "",
-                                 "Temperature",
-                                 kSaturation,
-                                 {"SATURATION_TEMPERATURE(10)", "179.885632"},
-                                 kFirst},
-                                kSaturationPressure, explain_saturation),
-    row<saturation_pressure>({"SATURATION_PRESSURE",
-                              kChapter,
-                              "Boiling pressure at a temperature",
-                              "",
-                              "Absolute pressure",
-                              kSaturation,
-                              {"SATURATION_PRESSURE(226.85)", "26.3889776"},
-                              kFirst},
-                             kSaturationTemperature, explain_saturation),
+    row_with_batch<saturation_temperature,
+                   column<Temperature, Pressure, water::batch::saturation_temperature>>(
+        {"SATURATION_TEMPERATURE",
+         kChapter,
+         "Boiling temperature at a pressure",
+         "",
+         "Temperature",
+         kSaturation,
+         {"SATURATION_TEMPERATURE(10)", "179.885632"},
+         kFirst},
+        kSaturationPressure, explain_saturation),
+    row_with_batch<saturation_pressure,
+                   column<Pressure, Temperature, water::batch::saturation_pressure>>(
+        {"SATURATION_PRESSURE",
+         kChapter,
+         "Boiling pressure at a temperature",
+         "",
+         "Absolute pressure",
+         kSaturation,
+         {"SATURATION_PRESSURE(226.85)", "26.3889776"},
+         kFirst},
+        kSaturationTemperature, explain_saturation),
 };
 
 }  // namespace

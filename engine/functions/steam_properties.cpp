@@ -2,6 +2,7 @@
 #include "functions/functions.hpp"
 #include "functions/steam_arguments.hpp"
 #include "water/batch/pressure_temperature.hpp"
+#include "water/batch/saturation.hpp"
 #include "water/properties/energy.hpp"
 #include "water/properties/response.hpp"
 
@@ -73,37 +74,41 @@ constexpr Row kRows[] = {
         words("STEAM_GIBBS_ENERGY", "Specific Gibbs energy h - T s at a pressure and a temperature",
               kLineNote, "Specific Gibbs energy (free enthalpy)", kEnergies,
               {"STEAM_GIBBS_ENERGY(30; 26.85)", "-2.35716470"})),
-    number<HeatCapacity, water::isobaric_heat_capacity>(
+    number_with_batch<HeatCapacity, water::isobaric_heat_capacity,
+                      water::batch::isobaric_heat_capacity>(
         words("STEAM_HEAT_CAPACITY", "Isobaric heat capacity cp at a pressure and a temperature",
               kLineNote, "Specific heat capacity at constant pressure", kDerivatives,
               {"STEAM_HEAT_CAPACITY(30; 26.85)", "4.17301218"})),
-    number<HeatCapacity, water::isochoric_heat_capacity>(
+    number_with_batch<HeatCapacity, water::isochoric_heat_capacity,
+                      water::batch::isochoric_heat_capacity>(
         words("STEAM_ISOCHORIC_HEAT_CAPACITY",
               "Isochoric heat capacity cv at a pressure and a temperature", kLineNote,
               "Specific heat capacity at constant volume", kDerivatives,
               {"STEAM_ISOCHORIC_HEAT_CAPACITY(200; 346.85)", "3.03793441"})),
-    number<Velocity, water::speed_of_sound>(
+    number_with_batch<Velocity, water::speed_of_sound, water::batch::speed_of_sound>(
         words("STEAM_SPEED_OF_SOUND", "Speed of sound at a pressure and a temperature", kLineNote,
               "Velocity", kDerivatives, {"STEAM_SPEED_OF_SOUND(30; 26.85)", "1507.73921"})),
-    number<Number, water::isentropic_exponent>(words(
+    number_with_batch<Number, water::isentropic_exponent, water::batch::isentropic_exponent>(words(
         "STEAM_ISENTROPIC_EXPONENT",
         "Isentropic exponent of p v^k = constant at a pressure and a temperature",
         "The exponent -(v/p)(dp/dv) at constant entropy. It is not cp/cv, which equals it only "
         "in an ideal gas.",
         "Isentropic exponent", kDerivatives,
         {"STEAM_ISENTROPIC_EXPONENT(0.035; 26.85)", "1.32481456"})),
-    number<JouleThomson, water::joule_thomson>(
+    number_with_batch<JouleThomson, water::joule_thomson, water::batch::joule_thomson>(
         words("STEAM_JOULE_THOMSON_COEFFICIENT",
               "Temperature change per pressure change in throttling, (dT/dp) at constant h",
               "Positive where throttling cools.", "Joule-Thomson coefficient", kDerivatives,
               {"STEAM_JOULE_THOMSON_COEFFICIENT(3; 376.85)", "0.831291340"})),
-    number<ThermalExpansion, water::isobaric_expansion>(
+    number_with_batch<ThermalExpansion, water::isobaric_expansion,
+                      water::batch::isobaric_expansion>(
         words("STEAM_ISOBARIC_EXPANSION",
               "Isobaric thermal expansion (1/v)(dv/dT) at a pressure and a temperature",
               "Negative in cold water below the temperature of its greatest density.",
               "Thermal expansion coefficient", kDerivatives,
               {"STEAM_ISOBARIC_EXPANSION(200; 346.85)", "0.00621449913"})),
-    number<Compressibility, water::isothermal_compressibility>(
+    number_with_batch<Compressibility, water::isothermal_compressibility,
+                      water::batch::isothermal_compressibility>(
         words("STEAM_ISOTHERMAL_COMPRESSIBILITY",
               "Isothermal compressibility -(1/v)(dv/dp) at a pressure and a temperature", kLineNote,
               "Compressibility", kDerivatives,
@@ -119,22 +124,25 @@ constexpr Row kRows[] = {
               "#N/A for superheated steam, and where the pressure has no saturation temperature.",
               "Kelvins (or °F) below saturation", kSaturatedStates,
               {"STEAM_SUBCOOLING(10; 150)", "29.8856324"})),
-    row<at_dryness<Enthalpy, &State::enthalpy>>(
+    row_with_batch<at_dryness<Enthalpy, &State::enthalpy>,
+                   columns<Enthalpy, Pressure, Fraction, water::batch::enthalpy_at_dryness>>(
         words("STEAM_ENTHALPY_AT_DRYNESS", "Specific enthalpy at a pressure and a dryness",
               "Dryness 0 is boiling water, 1 is saturated steam.", "Specific enthalpy",
               kSaturatedStates, {"STEAM_ENTHALPY_AT_DRYNESS(10; 1)", "2777.11954"}),
         kPressureDryness, explain_dryness),
-    row<at_dryness<Entropy, &State::entropy>>(
+    row_with_batch<at_dryness<Entropy, &State::entropy>,
+                   columns<Entropy, Pressure, Fraction, water::batch::entropy_at_dryness>>(
         words("STEAM_ENTROPY_AT_DRYNESS", "Specific entropy at a pressure and a dryness",
               "Dryness 0 is boiling water, 1 is saturated steam.", "Specific entropy",
               kSaturatedStates, {"STEAM_ENTROPY_AT_DRYNESS(10; 1)", "6.58497900"}),
         kPressureDryness, explain_dryness),
-    row<at_dryness<Volume, &State::volume>>(
+    row_with_batch<at_dryness<Volume, &State::volume>,
+                   columns<Volume, Pressure, Fraction, water::batch::volume_at_dryness>>(
         words("STEAM_VOLUME_AT_DRYNESS", "Specific volume at a pressure and a dryness",
               "Dryness 0 is boiling water, 1 is saturated steam.", "Specific volume",
               kSaturatedStates, {"STEAM_VOLUME_AT_DRYNESS(10; 1)", "0.194348884"}),
         kPressureDryness, explain_dryness),
-    row<latent_heat>(
+    row_with_batch<latent_heat, column<SpecificEnergy, Pressure, water::batch::latent_heat>>(
         words("LATENT_HEAT", "Enthalpy of evaporation at a pressure",
               "Saturated steam less boiling water; zero at the critical point.",
               "Specific enthalpy of evaporation", kSaturatedStates, {"LATENT_HEAT(1)", "2257.51"}),

@@ -1,5 +1,6 @@
 #include "water/state.hpp"
 
+#include <algorithm>
 #include <cmath>
 
 #include "water/constants.hpp"
@@ -86,10 +87,15 @@ Outcome<State> checked(const State& state) {
 // the last digits: a state that lies on the line by either of them is liquid.
 bool is_liquid(double pressure, double temperature) {
   constexpr double kRounding = 1e-9;
+  if (temperature <= kTemperature13) {
+    const double beside = rough_logarithm(pressure) - rough_saturation_logarithm(temperature);
+    if (beside > kSurelyLiquid) return true;
+    if (beside < kSurelyVapour) return false;
+  }
   const double saturation = saturation_pressure_equation(temperature);
   if (pressure >= saturation) return true;
   return pressure >= saturation * (1 - kRounding) && pressure >= kLowestSaturationPressure &&
-         temperature <= saturation_temperature_equation(std::fmin(pressure, kCriticalPressure));
+         temperature <= saturation_temperature_equation(std::min(pressure, kCriticalPressure));
 }
 
 bool in_region_3(double pressure, double temperature) {
@@ -97,14 +103,17 @@ bool in_region_3(double pressure, double temperature) {
          temperature <= kHighestTemperature23 && pressure > boundary_23_pressure(temperature);
 }
 
+// The checks in short: a Failure is made only where there is one.
+bool is_pressure(double pressure) { return pressure > 0 && pressure <= kHighestPressure; }
+
+bool has_saturation(double pressure) {
+  return pressure >= kLowestSaturationPressure && pressure <= kCriticalPressure;
+}
+
 template <Given kGiven>
 Outcome<State> at_pressure_and(double pressure, double value, Quantity quantity) {
-  if (const Failure failure = check_pressure(pressure); failure.fault != Fault::none) {
-    return failure;
-  }
-  if (const Failure failure = check_finite(2, {value, quantity}); failure.fault != Fault::none) {
-    return failure;
-  }
+  if (!is_pressure(pressure)) return check_pressure(pressure);
+  if (!std::isfinite(value)) return check_finite(2, {value, quantity});
   const Outcome<Found> found = on_isobar<kGiven>(pressure, value);
   if (!found) return found.failure();
   return checked(found->state);
@@ -113,12 +122,10 @@ Outcome<State> at_pressure_and(double pressure, double value, Quantity quantity)
 }  // namespace
 
 Outcome<State> at_pressure_temperature(double pressure, double temperature) {
-  if (const Failure failure = check_pressure(pressure); failure.fault != Fault::none) {
-    return failure;
-  }
-  if (const Failure failure = check_temperature(pressure, temperature);
-      failure.fault != Fault::none) {
-    return failure;
+  if (!is_pressure(pressure)) return check_pressure(pressure);
+  if (!(temperature >= kLowestTemperature && temperature <= kHighestTemperature2)) {
+    const Failure failure = check_temperature(pressure, temperature);
+    if (failure.fault != Fault::none) return failure;
   }
   if (temperature <= kTemperature13) {
     if (pressure > kPressure13 || is_liquid(pressure, temperature)) {
@@ -172,9 +179,7 @@ Outcome<State> at_pressure_entropy(double pressure, double entropy) {
 }
 
 Outcome<State> at_pressure_dryness(double pressure, double dryness) {
-  if (const Failure failure = check_saturation_pressure(pressure); failure.fault != Fault::none) {
-    return failure;
-  }
+  if (!has_saturation(pressure)) return check_saturation_pressure(pressure);
   const Measure value{dryness, Quantity::fraction};
   if (!std::isfinite(dryness)) return check_finite(2, value);
   if (dryness < 0) {
@@ -195,11 +200,9 @@ Outcome<State> at_pressure_dryness(double pressure, double dryness) {
 }
 
 Outcome<double> saturation_temperature(double pressure) {
-  if (const Failure failure = check_saturation_pressure(pressure); failure.fault != Fault::none) {
-    return failure;
-  }
-  return std::fmax(kLowestTemperature,
-                   std::fmin(saturation_temperature_equation(pressure), kCriticalTemperature));
+  if (!has_saturation(pressure)) return check_saturation_pressure(pressure);
+  return clamped(saturation_temperature_equation(pressure), kLowestTemperature,
+                 kCriticalTemperature);
 }
 
 Outcome<double> saturation_pressure(double temperature) {
@@ -213,8 +216,8 @@ Outcome<double> saturation_pressure(double temperature) {
     return outside(1, "{0} is above {1}, the critical temperature, where the saturation line ends",
                    value, {kCriticalTemperature, Quantity::temperature});
   }
-  return std::fmax(kLowestSaturationPressure,
-                   std::fmin(saturation_pressure_equation(temperature), kCriticalPressure));
+  return clamped(saturation_pressure_equation(temperature), kLowestSaturationPressure,
+                 kCriticalPressure);
 }
 
 }  // namespace busbar::water

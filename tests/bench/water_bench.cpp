@@ -1,6 +1,10 @@
 // What the water and steam kernels cost beside a plain transcription of the release.
+#include <cmath>
+
 #include "ratios.hpp"
+#include "water/batch/isobar.hpp"
 #include "water/batch/pressure_temperature.hpp"
+#include "water/batch/saturation.hpp"
 #include "water/state.hpp"
 #include "yardstick.hpp"
 
@@ -47,13 +51,34 @@ double scalar_density(double p, double t) {
   return 1 / water::at_pressure_temperature(p, t)->volume;
 }
 
-template <water::batch::AtPressureTemperature kBatch>
+// A batch with the states that it leaves to the scalar function.
+template <water::batch::AtPressureTemperature kBatch, double (*kScalar)(double, double)>
 void columns(const Pairs& in, std::vector<double>& out) {
   kBatch(in.first.data(), in.second.data(), out.data(), kStates);
+  for (std::size_t i = 0; i < kStates; ++i) {
+    if (!std::isfinite(out[i])) out[i] = kScalar(in.first[i], in.second[i]);
+  }
+}
+void columns_psat(const Pairs& in, std::vector<double>& out) {
+  water::batch::saturation_pressure(in.second.data(), out.data(), kStates);
+}
+void columns_tsat(const Pairs& in, std::vector<double>& out) {
+  water::batch::saturation_temperature(in.first.data(), out.data(), kStates);
 }
 void columns_vhs(const Pairs& in, std::vector<double>& out) {
   water::batch::volume_enthalpy_entropy(in.first.data(), in.second.data(), out.data(),
                                         out.data() + kStates, out.data() + 2 * kStates, kStates);
+}
+
+void columns_ts(const Pairs& in, std::vector<double>& out) {
+  water::batch::temperature_entropy_at_enthalpy(in.first.data(), in.second.data(), out.data(),
+                                                out.data() + kStates, kStates);
+  for (std::size_t i = 0; i < kStates; ++i) {
+    if (std::isfinite(out[i])) continue;
+    const auto state = water::at_pressure_enthalpy(in.first[i], in.second[i]);
+    out[i] = state->temperature;
+    out[kStates + i] = state->entropy;
+  }
 }
 
 Pairs on_saturation_line() {
@@ -75,21 +100,21 @@ int main(int argc, char** argv) {
   const Pairs saturation = on_saturation_line();
   const std::vector<Job> jobs{
       {"(p,t)->h, sheet", &sheet, yardstick::enthalpy, at_pt<&State::enthalpy>,
-       columns<water::batch::enthalpy>, 20, 60, 15},
+       columns<water::batch::enthalpy, at_pt<&State::enthalpy>>, 20, 60, 15},
       {"(p,t)->h, region 1", &liquid, yardstick::enthalpy, at_pt<&State::enthalpy>,
-       columns<water::batch::enthalpy>, 0, 0, 8},
+       columns<water::batch::enthalpy, at_pt<&State::enthalpy>>, 0, 0, 8},
       {"(p,t)->h, region 2", &vapour, yardstick::enthalpy, at_pt<&State::enthalpy>,
-       columns<water::batch::enthalpy>, 0, 0, 8},
+       columns<water::batch::enthalpy, at_pt<&State::enthalpy>>, 0, 0, 8},
       {"(p,t)->v,h,s, sheet", &sheet, plain_vhs, scalar_vhs, columns_vhs, 0, 100},
       {"(p,t)->density, region 3", &supercritical, yardstick::density_3, scalar_density,
-       columns<water::batch::density_3>, 0, 0, 50},
+       columns<water::batch::density_3, scalar_density>, 0, 0, 50},
       {"(p,h)->t, sheet", &ph, yardstick::temperature_at_enthalpy, at_ph<&State::temperature>,
-       nullptr, 30, 100},
-      {"(p,h)->t,s, sheet", &ph, plain_ts, scalar_ts, nullptr, 0, 0, 35},
+       columns<water::batch::temperature_at_enthalpy, at_ph<&State::temperature>>, 30, 100},
+      {"(p,h)->t,s, sheet", &ph, plain_ts, scalar_ts, columns_ts, 0, 0, 35},
       {"(p,s)->t, sheet", &ps, yardstick::temperature_at_entropy, at_ps<&State::temperature>,
-       nullptr, 30, 100},
-      {"t->saturation pressure", &saturation, plain_psat, scalar_psat, nullptr, 5, 0},
-      {"p->saturation temperature", &saturation, plain_tsat, scalar_tsat, nullptr, 5, 0},
+       columns<water::batch::temperature_at_entropy, at_ps<&State::temperature>>, 30, 100},
+      {"t->saturation pressure", &saturation, plain_psat, scalar_psat, columns_psat, 5, 0},
+      {"p->saturation temperature", &saturation, plain_tsat, scalar_tsat, columns_tsat, 5, 0},
   };
   return run(argc, argv, jobs);
 }

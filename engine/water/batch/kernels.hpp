@@ -15,6 +15,13 @@
 #include <utility>
 
 #include "water/constants.hpp"
+#include "water/solve/bounds.hpp"
+#include "water/solve/given.hpp"
+#include "water/tables/backward_1.hpp"
+#include "water/tables/backward_ph_2.hpp"
+#include "water/tables/backward_ph_3.hpp"
+#include "water/tables/backward_ps_2.hpp"
+#include "water/tables/backward_ps_3.hpp"
 #include "water/tables/backward_pt_3_a_to_f.hpp"
 #include "water/tables/backward_pt_3_boundaries.hpp"
 #include "water/tables/backward_pt_3_g_to_l.hpp"
@@ -39,8 +46,12 @@ namespace busbar::water::HWY_NAMESPACE {
 #include "water/kernels/saturation.hpp"
 #include "water/kernels/logarithm.hpp"
 #include "water/kernels/properties.hpp"
+#include "water/kernels/inverse.hpp"
 #include "water/kernels/density.hpp"
+#include "water/kernels/backward.hpp"
 #include "water/kernels/subregions.hpp"
+#include "water/kernels/response.hpp"
+#include "water/kernels/second_order.hpp"
 // clang-format on
 
 }  // namespace busbar::water::HWY_NAMESPACE

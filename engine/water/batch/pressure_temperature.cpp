@@ -21,6 +21,9 @@ namespace busbar::water::HWY_NAMESPACE {
 template <class Property>
 struct One {
   static constexpr std::size_t kColumns = 1;
+  static void block(const double* p, const double* t, double* const* out, std::size_t n) {
+    run_block<One>(p, t, out, n);
+  }
   template <class Equation>
   HWY_INLINE static void gibbs(Lanes pressure, Lanes temperature, Lanes* out) {
     const auto at = gibbs_properties_at<Equation, Property::kWanted>(pressure, temperature);
@@ -68,6 +71,9 @@ struct GibbsEnergyOf {
 
 struct VolumeEnthalpyEntropy {
   static constexpr std::size_t kColumns = 3;
+  static void block(const double* p, const double* t, double* const* out, std::size_t n) {
+    run_block<VolumeEnthalpyEntropy>(p, t, out, n);
+  }
   HWY_INLINE static void give(const At& at, Lanes* out) {
     out[0] = at.volume;
     out[1] = at.enthalpy;

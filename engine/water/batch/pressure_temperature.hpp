@@ -21,6 +21,15 @@ AtPressureTemperature internal_energy;
 AtPressureTemperature helmholtz_energy;
 AtPressureTemperature gibbs_energy;
 
+// Second-order properties (water/properties/response.hpp).
+AtPressureTemperature isobaric_heat_capacity;
+AtPressureTemperature isochoric_heat_capacity;
+AtPressureTemperature speed_of_sound;
+AtPressureTemperature isentropic_exponent;
+AtPressureTemperature joule_thomson;
+AtPressureTemperature isobaric_expansion;
+AtPressureTemperature isothermal_compressibility;
+
 /// Volume, enthalpy and entropy together.
 void volume_enthalpy_entropy(const double* pressure, const double* temperature, double* volume,
                              double* enthalpy, double* entropy, std::size_t count);

@@ -49,15 +49,6 @@ inline void run_region(std::size_t region, const double* pressure, const double*
   }
 }
 
-template <class Job>
-struct Answers {
-  double column[Job::kColumns][kPadded];
-  double* at[Job::kColumns];
-  Answers() {
-    for (std::size_t c = 0; c < Job::kColumns; ++c) at[c] = column[c];
-  }
-};
-
 // States of several regions: list by list.
 template <class Job>
 inline void run_sorted(const double* region, const double* pressure, const double* temperature,
@@ -95,33 +86,5 @@ inline void run_block(const double* pressure, const double* temperature, double*
                     out, n);
   } else {
     run_sorted<Job>(region, pressure, temperature, out, n);
-  }
-}
-
-template <class Job>
-inline void run_blocks(const double* pressure, const double* temperature, double* const* out,
-                       std::size_t count) {
-  double* at[Job::kColumns];
-  std::size_t done = 0;
-  while (count - done >= kLanes) {
-    std::size_t n = count - done < kBlock ? count - done : kBlock;
-    n -= n % kLanes;
-    for (std::size_t c = 0; c < Job::kColumns; ++c) at[c] = out[c] + done;
-    run_block<Job>(pressure + done, temperature + done, at, n);
-    done += n;
-  }
-  if (done == count) return;
-  // The last few, in columns of one vector.
-  double p[kLanes];
-  double t[kLanes];
-  Answers<Job> answers;
-  for (std::size_t i = 0; i < kLanes; ++i) {
-    const std::size_t from = done + i < count ? done + i : count - 1;
-    p[i] = pressure[from];
-    t[i] = temperature[from];
-  }
-  run_block<Job>(p, t, answers.at, kLanes);
-  for (std::size_t c = 0; c < Job::kColumns; ++c) {
-    for (std::size_t i = done; i < count; ++i) out[c][i] = answers.column[c][i - done];
   }
 }

@@ -68,3 +68,43 @@ HWY_INLINE Lanes region_at(Lanes pressure, Lanes temperature) {
                       ((temperature <= kHighestTemperature2) | (pressure <= kHighestPressure5));
   return select(inside, select(cold, of_cold, of_warm), kRedo);
 }
+
+// Columns for the answers of a job.
+template <class Job>
+struct Answers {
+  double column[Job::kColumns][kPadded];
+  double* at[Job::kColumns];
+  Answers() {
+    for (std::size_t c = 0; c < Job::kColumns; ++c) at[c] = column[c];
+  }
+};
+
+// Two columns block by block. A job says how many columns it gives (kColumns) and fills them for a
+// block of whole vectors: block(first, second, out, n).
+template <class Job>
+inline void run_blocks(const double* first, const double* second, double* const* out,
+                       std::size_t count) {
+  double* at[Job::kColumns];
+  std::size_t done = 0;
+  while (count - done >= kLanes) {
+    std::size_t n = count - done < kBlock ? count - done : kBlock;
+    n -= n % kLanes;
+    for (std::size_t c = 0; c < Job::kColumns; ++c) at[c] = out[c] + done;
+    Job::block(first + done, second + done, at, n);
+    done += n;
+  }
+  if (done == count) return;
+  // The last few, in columns of one vector.
+  double a[kLanes];
+  double b[kLanes];
+  Answers<Job> answers;
+  for (std::size_t i = 0; i < kLanes; ++i) {
+    const std::size_t from = done + i < count ? done + i : count - 1;
+    a[i] = first[from];
+    b[i] = second[from];
+  }
+  Job::block(a, b, answers.at, kLanes);
+  for (std::size_t c = 0; c < Job::kColumns; ++c) {
+    for (std::size_t i = done; i < count; ++i) out[c][i] = answers.column[c][i - done];
+  }
+}

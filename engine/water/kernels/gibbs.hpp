@@ -22,7 +22,7 @@ struct Region1Equation {
   static constexpr bool kHasLogarithm = false;
 
   template <unsigned kSet, class Real>
-  static Gibbs<Real> at(Real pi, Real tau) {
+  [[gnu::always_inline]] static Gibbs<Real> at(Real pi, Real tau) {
     const Real x = 7.1 - pi;
     const Real y = tau - 1.222;
     const Sums<Real> sum = series<tables::kRegion1, kSet>(x, y);
@@ -44,7 +44,7 @@ namespace gibbs_detail {
 
 // Ideal-gas part in powers of tau and residual part in powers of pi and tau - shift.
 template <const auto& kIdeal, const auto& kResidual, unsigned kSet, class Real>
-inline Gibbs<Real> vapour(Real pi, Real tau, double shift) {
+[[gnu::always_inline]] inline Gibbs<Real> vapour(Real pi, Real tau, double shift) {
   constexpr unsigned kIdealSet = kSet & (kValue | kY | kYY | kYYY);
   const Real y = tau - shift;
   const Sums<Real> ideal = series<kIdeal, kIdealSet>(pi, tau);
@@ -76,7 +76,7 @@ struct Region2Equation {
   static constexpr bool kHasLogarithm = true;
 
   template <unsigned kSet, class Real>
-  static Gibbs<Real> at(Real pi, Real tau) {
+  [[gnu::always_inline]] static Gibbs<Real> at(Real pi, Real tau) {
     return gibbs_detail::vapour<tables::kRegion2Ideal, tables::kRegion2Residual, kSet>(pi, tau,
                                                                                        0.5);
   }
@@ -89,7 +89,7 @@ struct Region5Equation {
   static constexpr bool kHasLogarithm = true;
 
   template <unsigned kSet, class Real>
-  static Gibbs<Real> at(Real pi, Real tau) {
+  [[gnu::always_inline]] static Gibbs<Real> at(Real pi, Real tau) {
     return gibbs_detail::vapour<tables::kRegion5Ideal, tables::kRegion5Residual, kSet>(pi, tau,
                                                                                        0.0);
   }

@@ -16,7 +16,7 @@ struct Helmholtz {
 
 struct Region3Equation {
   template <unsigned kSet, class Real>
-  static Helmholtz<Real> at(Real delta, Real tau) {
+  [[gnu::always_inline]] static Helmholtz<Real> at(Real delta, Real tau) {
     const Sums<Real> sum = series<tables::kRegion3, kSet>(delta, tau);
     Helmholtz<Real> out;
     if constexpr ((kSet & kValue) != 0) out.value = sum.value;

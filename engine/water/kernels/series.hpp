@@ -174,7 +174,7 @@ template <const auto& kTable, int kScale, unsigned kSet, int kRow, class Real, c
 }
 
 template <const auto& kTable, int kScale, unsigned kSet, class Real, int... kRow>
-inline Sums<Real> sum_rows(Real x, Real y, Indices<kRow...>) {
+[[gnu::always_inline]] inline Sums<Real> sum_rows(Real x, Real y, Indices<kRow...>) {
   constexpr Span sx = span_x<kTable, kScale>();
   constexpr Span sy = span_y<kTable>();
   const Powers<sx.lowest, sx.highest, Real> px(x);
@@ -192,7 +192,7 @@ inline Sums<Real> sum_rows(Real x, Real y, Indices<kRow...>) {
 /// x and y must not be zero where the table has negative exponents. With kScale = 4 the caller
 /// hands over x^(1/4).
 template <const auto& kTable, unsigned kSet, int kScale = 1, class Real>
-inline Sums<Real> series(Real x, Real y) {
+[[gnu::always_inline]] inline Sums<Real> series(Real x, Real y) {
   return series_detail::sum_rows<kTable, kScale, kSet>(
       x, y, series_detail::IndicesTo<series_detail::kRows<kTable>>{});
 }

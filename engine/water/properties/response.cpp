@@ -3,7 +3,6 @@
 #include <cmath>
 
 #include "water/constants.hpp"
-#include "water/equations/helmholtz.hpp"
 #include "water/failure.hpp"
 #include "water/properties/gibbs_response.hpp"
 
@@ -40,27 +39,8 @@ Response response_5(double pressure, double temperature) {
   return gibbs_response<Region5Equation>(pressure, temperature);
 }
 
-// R7-97(2012), table 31.
 Response response_3(double density, double temperature) {
-  const double delta = density / kCriticalDensity;
-  const double tau = kCriticalTemperature / temperature;
-  const auto f = Region3Equation::at<kX | kXX | kYY | kXY>(delta, tau);
-  const double rt = kGasConstant * temperature;
-  const double stiffness = 2 * f.delta1 + f.delta2;  // (dp/drho)_T / (R T)
-  const double thermal = f.delta1 - f.mixed;         // (dp/dT)_rho / (rho R)
-  Response out;
-  out.isochoric_heat_capacity = -kGasConstant * f.tau2;
-  out.isobaric_heat_capacity = kGasConstant * (thermal * thermal / stiffness - f.tau2);
-  const double isentropic = stiffness - thermal * thermal / f.tau2;  // (dp/drho)_s / (R T)
-  out.speed_of_sound = std::sqrt(rt * isentropic);
-  out.isentropic_exponent = isentropic / f.delta1;
-  out.isobaric_expansion = thermal / (stiffness * temperature);
-  out.isothermal_compressibility = 1 / (density * rt * stiffness);
-  // v (T beta - 1) / cp, multiplied through with the stiffness, which vanishes at the critical
-  // point
-  out.joule_thomson =
-      (thermal - stiffness) / (density * kGasConstant * (thermal * thermal - f.tau2 * stiffness));
-  return out;
+  return helmholtz_response_at(density, temperature);
 }
 
 Response response_of_phase(const State& state) {

@@ -6,16 +6,9 @@
 
 namespace busbar::water {
 
-/// SI. All follow from the second derivatives of the basic equation of the region.
-struct Response {
-  double isobaric_heat_capacity = 0;      ///< cp = (dh/dT)_p, J/(kg K)
-  double isochoric_heat_capacity = 0;     ///< cv = (du/dT)_v, J/(kg K)
-  double speed_of_sound = 0;              ///< w = v sqrt(-(dp/dv)_s), m/s
-  double isentropic_exponent = 0;         ///< -(v/p) (dp/dv)_s
-  double joule_thomson = 0;               ///< (dT/dp)_h, K/Pa
-  double isobaric_expansion = 0;          ///< (1/v) (dv/dT)_p, 1/K
-  double isothermal_compressibility = 0;  ///< -(1/v) (dv/dp)_T, 1/Pa
-};
+#include "water/kernels/response.hpp"
+
+using Response = ResponseOf<double>;
 
 /// The response of a single-phase state. Saturated liquid (dryness 0) and saturated vapour
 /// (dryness 1) answer with the limit of their own phase. Failures, argument 0: missing between

@@ -3,9 +3,20 @@
 // each against the basic equations.
 #pragma once
 
-#include "water/solve/inverse.hpp"
+#include "water/solve/given.hpp"
 
 namespace busbar::water {
+
+// Distance (K) from a boundary within which the boundary is evaluated instead of trusting a start.
+inline constexpr double kMargin = 0.1;
+
+// The same for a solution: nearer to a boundary than this (K), rounding could decide.
+inline constexpr double kCertain = 1e-6;
+
+// Relative error of the equations psat(h) and psat(s) of SR3-03(2014), and the distance above
+// 16.529 MPa down to which they are not asked.
+inline constexpr double kErrorOfDome3 = 1e-4;
+inline constexpr double kEndOfDome3 = 1e-3;
 
 template <Given kGiven>
 struct Bounds;

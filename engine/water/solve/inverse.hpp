@@ -2,12 +2,10 @@
 // equations and carried to the solution of the basic equation.
 #pragma once
 
+#include "water/solve/given.hpp"
 #include "water/solve/properties.hpp"
 
 namespace busbar::water {
-
-/// What is given together with the pressure.
-enum class Given : unsigned char { enthalpy, entropy };
 
 template <Given kGiven>
 inline double given_of(const Properties& properties) {

@@ -49,12 +49,6 @@ struct Property<Given::entropy> : Bounds<Given::entropy> {
   static double saturation_pressure_3(double s) { return backward::saturation_pressure_s_3(s); }
 };
 
-// Distance (K) from a boundary within which the boundary is evaluated instead of trusting a start.
-constexpr double kMargin = 0.1;
-
-// The same for a solution: nearer to a boundary than this (K), rounding could decide.
-constexpr double kCertain = 1e-6;
-
 template <Given kGiven>
 Properties with_given(Properties properties, double value) {
   if constexpr (kGiven == Given::enthalpy) {
@@ -233,10 +227,9 @@ class Isobar {
   // The equations psat(h) and psat(s) of SR3-03(2014) tell on which side of the saturation line a
   // state is, but for their error; so does being far outside the enthalpies of the line.
   bool may_be_two_phase() const {
-    constexpr double kError = 1e-4;
     if (value_ < Bound::kBelowDome3 || value_ > Bound::kAboveDome3) return false;
-    return pressure_ < Bound::saturation_pressure_3(value_) * (1 + kError) ||
-           pressure_ < kPressure13 * (1 + 1e-3);
+    return pressure_ < Bound::saturation_pressure_3(value_) * (1 + kErrorOfDome3) ||
+           pressure_ < kPressure13 * (1 + kEndOfDome3);
   }
 
   Outcome<Found> in_region_3(double boundary) {

@@ -4,18 +4,19 @@
 #include "water/equations/gibbs.hpp"
 #include "water/equations/helmholtz.hpp"
 #include "water/equations/logarithm.hpp"
+#include "water/solve/given.hpp"
 
 namespace busbar::water {
 
+// In the order of use.
+// clang-format off
 #include "water/kernels/properties.hpp"
+#include "water/kernels/inverse.hpp"
+// clang-format on
 
 using Properties = PropertiesOf<double>;
 
-/// `from` at weight 0, `to` at weight 1, both to the last bit, and linear in between.
-inline double mixed(double from, double to, double weight) {
-  const double width = to - from;
-  return weight < 0.5 ? from + weight * width : to - (1 - weight) * width;
-}
+inline double mixed(double from, double to, double weight) { return mixed_at(from, to, weight); }
 
 inline Properties mixed(const Properties& from, const Properties& to, double weight) {
   return {mixed(from.volume, to.volume, weight), mixed(from.enthalpy, to.enthalpy, weight),
