@@ -193,7 +193,8 @@ class Caller {
 
   Cell read_and_compute(std::size_t r, std::size_t c) {
     const Trouble found = read_varying(r, c);
-    return found ? error(found) : compute();
+    if (found) return error(found);
+    return compute();
   }
 
   // What the batch kernel does not answer, for whatever reason, is computed as a single cell.
