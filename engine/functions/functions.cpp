@@ -50,6 +50,8 @@ std::vector<const Row*> gather() {
            fuel_library(),
            solid_fuels(),
            solid_fuel_heating_values(),
+           combustion_air(),
+           combustion_flue_gas(),
            boiler_losses(),
            gaseous_fuels(),
            gaseous_fuel_tables(),
