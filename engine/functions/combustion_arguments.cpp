@@ -37,17 +37,6 @@ Text as_text(const Composition& composition) {
   return text;
 }
 
-std::string heading(const char* name, Quantity quantity, UnitSet units) {
-  std::string text = name;
-  const Unit& unit = unit_of(units, quantity);
-  if (!unit.symbol.empty()) {
-    text += " (";
-    text += unit.symbol;
-    text += ')';
-  }
-  return text;
-}
-
 void explain_combustion_fuel(const Slot* in, const Result&, UnitSet units, std::string& text) {
   const Outcome<Fuel> fuel = combustion::fuel_from(in[0].composition().composition);
   if (!fuel) return;

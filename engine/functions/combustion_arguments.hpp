@@ -31,9 +31,6 @@ inline double or_none(std::optional<Number> amount) { return amount ? amount->si
 
 Text as_text(const Composition& composition);
 
-/// A heading of a table with its unit.
-std::string heading(const char* name, Quantity quantity, UnitSet units);
-
 /// Explain hook of rows whose first two arguments are fuel and air.
 void explain_firing(const Slot* in, const Result& result, UnitSet units, std::string& text);
 /// Explain hook of rows whose first argument is a fuel.

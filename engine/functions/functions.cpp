@@ -52,6 +52,7 @@ std::vector<const Row*> gather() {
            solid_fuel_heating_values(),
            combustion_air(),
            combustion_flue_gas(),
+           combustion_flames(),
            boiler_losses(),
            gaseous_fuels(),
            gaseous_fuel_tables(),

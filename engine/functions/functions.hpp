@@ -38,6 +38,7 @@ std::span<const Row> solid_fuels();
 std::span<const Row> solid_fuel_heating_values();
 std::span<const Row> combustion_air();
 std::span<const Row> combustion_flue_gas();
+std::span<const Row> combustion_flames();
 std::span<const Row> boiler_losses();
 std::span<const Row> gaseous_fuels();
 std::span<const Row> gaseous_fuel_tables();
