@@ -101,7 +101,9 @@ Trouble read_number(const Row& row, std::size_t index, const Cell& cell, UnitSet
   return {outside(index, argument, quantity, *number, si), {}};
 }
 
-Trouble read_stream_cell(std::size_t index, const Cell& cell, std::optional<Stream>& stream) {
+// `keep` takes the stream that was read.
+template <class Keep>
+Trouble read_stream_cell(std::size_t index, const Cell& cell, Keep&& keep) {
   const auto* text = std::get_if<std::string>(&cell);
   if (text == nullptr || text->empty()) {
     if (const double* number = std::get_if<double>(&cell); number != nullptr && *number == 0) {
@@ -116,7 +118,7 @@ Trouble read_stream_cell(std::size_t index, const Cell& cell, std::optional<Stre
   if (!read) {
     return {read.failure().about(position(index)), quotable(*text)};
   }
-  stream = *read;
+  keep(*read);
   return {};
 }
 
@@ -172,11 +174,10 @@ Trouble read_cell(const Row& row, std::size_t index, const Cell& cell, UnitSet u
   switch (row.types[index].kind) {
     case Kind::number:
       return read_number(row, index, cell, units, slot.si);
-    case Kind::stream: {
-      Trouble found = read_stream_cell(index, cell, space.stream[index]);
-      if (!found) slot.stream = &*space.stream[index];
-      return found;
-    }
+    case Kind::stream:
+      return read_stream_cell(index, cell, [&](const Stream& stream) {
+        slot.stream = space.stream[index].hold(stream);
+      });
     case Kind::word:
       return read_word(index, cell, slot);
     case Kind::composition: {
@@ -200,10 +201,8 @@ Trouble read_range(const Row& row, std::size_t index, const Grid& grid, UnitSet 
     auto& streams = space.streams.emplace_front();
     streams.reserve(cells);
     Trouble found = read_cells(grid, [&](const Cell& cell) {
-      std::optional<Stream> stream;
-      Trouble trouble = read_stream_cell(index, cell, stream);
-      if (stream) streams.push_back(*stream);
-      return trouble;
+      return read_stream_cell(index, cell,
+                              [&](const Stream& stream) { streams.push_back(stream); });
     });
     slot.set(streams.data(), streams.size());
     return found;

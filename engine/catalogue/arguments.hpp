@@ -3,8 +3,9 @@
 
 #include <array>
 #include <forward_list>
-#include <optional>
+#include <memory>
 #include <string>
+#include <type_traits>
 #include <vector>
 
 #include "catalogue/row.hpp"
@@ -12,9 +13,22 @@
 
 namespace busbar {
 
+/// Room for the stream of one argument. A call that has none does not pay for clearing it.
+class StreamRoom {
+ public:
+  StreamRoom() {}  // NOLINT(modernize-use-equals-default): default would make it no constructor
+  const Stream* hold(const Stream& stream) { return std::construct_at(&stream_, stream); }
+
+ private:
+  static_assert(std::is_trivially_destructible_v<Stream>);
+  union {
+    Stream stream_;
+  };
+};
+
 /// What decoded arguments point into; lives as long as the call.
 struct Workspace {
-  std::array<std::optional<Stream>, kMostArguments> stream;
+  std::array<StreamRoom, kMostArguments> stream;
   std::forward_list<std::vector<double>> numbers;
   std::forward_list<std::vector<Stream>> streams;
   std::forward_list<GivenComposition> compositions;

@@ -42,18 +42,19 @@ class Caller {
     return out;
   }
 
-  [[nodiscard]] UnitSet units() const { return units_; }
+  [[nodiscard]] UnitSet units() const { return options_.units; }
 
   // After a run that worked: what the first cell's computation has to say.
   void explain_first(std::string& text) {
     if (prepare() || read_varying(0, 0)) return;
     Result result;
-    if (row_.thunk(slots_.data(), units_, result).fault != Fault::none) return;
-    if (row_.explain != nullptr) row_.explain(slots_.data(), result, units_, text);
+    if (row_.thunk(slots_.data(), options_, result).fault != Fault::none) return;
+    if (row_.explain != nullptr) row_.explain(slots_.data(), result, options_.units, text);
     for (std::size_t i = 0; i < row_.arguments.size(); ++i) {
-      const bool zero_temperature = row_.types[i].kind == Kind::number && slots_[i].given &&
-                                    row_.types[i].quantity == Quantity::temperature &&
-                                    unit_of(units_, Quantity::temperature).to_si(0) == slots_[i].si;
+      const bool zero_temperature =
+          row_.types[i].kind == Kind::number && slots_[i].given &&
+          row_.types[i].quantity == Quantity::temperature &&
+          unit_of(options_.units, Quantity::temperature).to_si(0) == slots_[i].si;
       if (!zero_temperature) continue;
       text += " Note: ";
       text += row_.arguments[i].name;
@@ -146,7 +147,7 @@ class Caller {
       found.failure = options.failure().about(at);
       return found;
     }
-    units_ = options->units;
+    options_ = *options;
     return {};
   }
 
@@ -165,10 +166,10 @@ class Caller {
     }
     if (!is_lifted(type.kind, *grid)) {
       if (type.kind == Kind::cell) return {};
-      return read_range(row_, index, *grid, units_, space_, slots_[index]);
+      return read_range(row_, index, *grid, options_.units, space_, slots_[index]);
     }
     if (grid->is_single()) {
-      return read_cell(row_, index, grid->at(0, 0), units_, space_, slots_[index]);
+      return read_cell(row_, index, grid->at(0, 0), options_.units, space_, slots_[index]);
     }
     varying_[varying_count_++] = index;
     const auto fit = [](std::size_t& whole, std::size_t part) {
@@ -203,8 +204,8 @@ class Caller {
     for (std::size_t i = 0; i < varying_count_; ++i) {
       varying[i] = {arguments_[varying_[i]], varying_[i]};
     }
-    const auto batches =
-        std::make_unique<Columns>(row_, units_, slots_, std::span(varying).first(varying_count_));
+    const auto batches = std::make_unique<Columns>(row_, options_.units, slots_,
+                                                   std::span(varying).first(varying_count_));
     const std::size_t cells = shape_.rows * shape_.columns;
     std::size_t r = 0;
     std::size_t c = 0;
@@ -230,7 +231,8 @@ class Caller {
       const std::size_t index = varying_[i];
       const Grid& grid = *arguments_[index];
       const Cell& cell = grid.at(grid.rows() == 1 ? 0 : r, grid.columns() == 1 ? 0 : c);
-      if (Trouble found = read_cell(row_, index, cell, units_, space_, slots_[index])) return found;
+      if (Trouble found = read_cell(row_, index, cell, options_.units, space_, slots_[index]))
+        return found;
     }
     return {};
   }
@@ -239,25 +241,26 @@ class Caller {
     if (found) return Grid(error(found));
     if (row_.result.kind != ResultKind::table) return Grid(compute());
     Result result;
-    const Failure failure = row_.thunk(slots_.data(), units_, result);
+    const Failure failure = row_.thunk(slots_.data(), options_, result);
     if (failure.fault != Fault::none) return Grid(error(about(failure)));
     return std::move(*result.table);
   }
 
   Cell compute() {
     Result result;
-    const Failure failure = row_.thunk(slots_.data(), units_, result);
+    const Failure failure = row_.thunk(slots_.data(), options_, result);
     if (failure.fault != Fault::none) return error(about(failure));
     switch (row_.result.kind) {
       case ResultKind::number: {
-        const double number = unit_of(units_, row_.result.quantity).from_si(result.si);
+        const double number = unit_of(options_.units, row_.result.quantity).from_si(result.si);
         if (std::isfinite(number)) return number;
         return error({{Fault::outside_range, 0, "has no finite result for these arguments"}, {}});
       }
       case ResultKind::stream: {
         std::string text;
         text.reserve(160);
-        write_stream(text, *result.stream, row_.has_options ? units_ : face_of_first_stream());
+        write_stream(text, *result.stream,
+                     row_.has_options ? options_.units : face_of_first_stream());
         return text;
       }
       case ResultKind::text:
@@ -292,12 +295,12 @@ class Caller {
   }
 
   [[nodiscard]] Cell error(const Trouble& found) const {
-    return Error({found.failure, &row_, units_, found.word});
+    return Error({found.failure, &row_, options_.units, found.word});
   }
 
   const Row& row_;
   Arguments arguments_;
-  UnitSet units_ = UnitSet::metric;
+  Options options_;
   Shape shape_;
   std::array<Slot, kMostArguments> slots_;
   std::array<std::size_t, kMostArguments> varying_{};

@@ -20,6 +20,7 @@
 #include <utility>
 
 #include "catalogue/composition.hpp"
+#include "catalogue/options.hpp"
 #include "catalogue/value.hpp"
 #include "core/outcome.hpp"
 #include "core/units.hpp"
@@ -212,9 +213,14 @@ struct Typed<std::optional<Of<Q>>> {
   }
 };
 
-/// A kernel that needs the unit set itself (a table with units in its headings) takes it so, last.
+/// A kernel that needs the unit set itself (a table with units in its headings) or another option
+/// takes it so, last.
 template <>
 struct Typed<UnitSet> {
+  static constexpr Type type{Kind::options, Quantity::number, true};
+};
+template <>
+struct Typed<Options> {
   static constexpr Type type{Kind::options, Quantity::number, true};
 };
 
@@ -260,7 +266,7 @@ struct Words {
 /// Adds to the explanation of a call that worked: region, validity, sensitivities.
 using Explain = void (*)(const Slot* in, const Result& result, UnitSet units, std::string& text);
 
-using Thunk = Failure (*)(const Slot* in, UnitSet units, Result& out);
+using Thunk = Failure (*)(const Slot* in, const Options& options, Result& out);
 
 /// A column of numbers of one quantity, in SI, as a batch kernel takes and fills it.
 template <class Q>
@@ -298,7 +304,8 @@ struct Row {
 namespace detail {
 
 template <class T>
-inline constexpr bool kIsOptions = std::is_same_v<std::remove_cvref_t<T>, UnitSet>;
+inline constexpr bool kIsOptions = std::is_same_v<std::remove_cvref_t<T>, UnitSet> ||
+                                   std::is_same_v<std::remove_cvref_t<T>, Options>;
 
 template <auto Kernel>
 struct Bind;
@@ -326,18 +333,20 @@ struct Bind<Kernel> {
   }
 
   template <class T>
-  static decltype(auto) take(const Slot& slot, UnitSet units) {
-    if constexpr (kIsOptions<T>) {
-      return units;
+  static decltype(auto) take(const Slot& slot, const Options& options) {
+    if constexpr (std::is_same_v<std::remove_cvref_t<T>, UnitSet>) {
+      return UnitSet{options.units};
+    } else if constexpr (kIsOptions<T>) {
+      return Options{options};
     } else {
       return Typed<std::remove_cvref_t<T>>::take(slot);
     }
   }
 
-  static Failure thunk([[maybe_unused]] const Slot* in, [[maybe_unused]] UnitSet units,
+  static Failure thunk([[maybe_unused]] const Slot* in, [[maybe_unused]] const Options& options,
                        Result& out) {
     return [&]<std::size_t... I>(std::index_sequence<I...>) {
-      Outcome<R> outcome = Kernel(take<A>(in[I], units)...);
+      Outcome<R> outcome = Kernel(take<A>(in[I], options)...);
       if (outcome) Typed<R>::give(std::move(*outcome), out);
       return outcome.failure();
     }

@@ -2,7 +2,7 @@
 
 #include <cmath>
 
-#include "water/stream.hpp"
+#include "fluid/state.hpp"
 
 namespace busbar::cycle {
 namespace {
@@ -27,9 +27,12 @@ Outcome<double> curzon_ahlborn(double hot, double cold) {
 }
 
 Outcome<double> mean_heating_temperature(const Stream& inlet, const Stream& outlet) {
-  const auto before = water::state_of(inlet);
+  if (const Failure other = fluid::refuse_other_fluid(inlet, outlet); other.fault != Fault::none) {
+    return other;
+  }
+  const auto before = fluid::state_of(inlet);
   if (!before) return before.failure().about(1);
-  const auto after = water::state_of(outlet);
+  const auto after = fluid::state_of(outlet);
   if (!after) return after.failure().about(2);
   const double heat = after->enthalpy - before->enthalpy;
   const double entropy = after->entropy - before->entropy;

@@ -4,8 +4,9 @@
 
 #include "catalogue/sentence.hpp"
 #include "core/text.hpp"
+#include "fluid/state.hpp"
+#include "gas/properties.hpp"
 #include "water/describe.hpp"
-#include "water/stream.hpp"
 
 namespace busbar::functions {
 namespace {
@@ -13,6 +14,7 @@ namespace {
 // A temperature reading and a pressure reading together seldom place a state closer to saturation
 // than this (common practice, no source).
 constexpr double kInstrumentReach = 2;
+constexpr int kFractionDigits = 4;
 
 // Limits of R7-97(2012), section 2.
 constexpr double kLeast = 273.15;
@@ -55,6 +57,38 @@ void append_distance(std::string& text, const water::Neighbourhood& near, UnitSe
       "from a wet one";
 }
 
+// "Gas of 28.6 kg/kmol: 74.3 % N2, 12 % O2, ... by mole; ..."
+void describe_gas(std::string& text, const Stream& stream, UnitSet units) {
+  const gas::Mixture& mixture = stream.mixture;
+  text += " Ideal gas of molar mass ";
+  append_measure(text, {mixture.molar_mass(), Quantity::molar_mass}, units);
+  text += ", by mole";
+  for (std::size_t i = 0; i < mixture.size(); ++i) {
+    text += i == 0 ? " " : ", ";
+    append_number(text, mixture.mole_fraction(i) * 100, kFractionDigits);
+    text += " % ";
+    text += gas::name_of(mixture.species(i));
+  }
+  text += "; readers show its enthalpy ";
+  if (stream.datum == gas::Datum::formation) {
+    text += "with heats of formation.";
+  } else {
+    text += "as zero at ";
+    text += gas::name_of(stream.datum);
+    text += '.';
+  }
+}
+
+// Where the equations of the fluid hold.
+void append_validity_of(std::string& text, const Stream& stream, UnitSet units) {
+  if (!fluid::is_gas(stream)) return append_validity(text, units);
+  text += " The NASA polynomials hold from ";
+  append_measure(text, {gas::lowest_temperature(stream.mixture), Quantity::temperature}, units);
+  text += " to ";
+  append_measure(text, {gas::highest_temperature(stream.mixture), Quantity::temperature}, units);
+  text += '.';
+}
+
 void append_stream(std::string& text, const char* which, const Stream& stream, UnitSet units) {
   text += which;
   describe_stream(text, stream, units);
@@ -83,7 +117,8 @@ void describe_stream(std::string& text, const Stream& stream, UnitSet units) {
     text += stream.tag.text();
     text += ':';
   }
-  if (const auto state = water::state_of(stream)) describe_state(text, *state, units);
+  if (fluid::is_gas(stream)) return describe_gas(text, stream, units);
+  if (const auto state = fluid::state_of(stream)) describe_state(text, *state, units);
 }
 
 Failure no_dryness(const water::State& state, std::uint8_t argument) {
@@ -106,18 +141,18 @@ Failure no_dryness(const water::State& state, std::uint8_t argument) {
 
 void explain_result(const Slot*, const Result& result, UnitSet units, std::string& text) {
   describe_stream(text, *result.stream, units);
-  append_validity(text, units);
+  append_validity_of(text, *result.stream, units);
 }
 
 void explain_first(const Slot* in, const Result&, UnitSet units, std::string& text) {
   describe_stream(text, *in[0].stream, units);
-  append_validity(text, units);
+  append_validity_of(text, *in[0].stream, units);
 }
 
 void explain_first_and_second(const Slot* in, const Result&, UnitSet units, std::string& text) {
   append_stream(text, " Inlet:", *in[0].stream, units);
   append_stream(text, " Outlet:", *in[1].stream, units);
-  append_validity(text, units);
+  append_validity_of(text, *in[0].stream, units);
 }
 
 }  // namespace busbar::functions

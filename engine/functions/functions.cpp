@@ -45,6 +45,7 @@ std::vector<const Row*> gather() {
            air_formulas(),
            compositions(),
            gases(),
+           gas_streams(),
            diagrams(),
            fuel_moisture(),
            fuel_library(),

@@ -31,6 +31,7 @@ std::span<const Row> air_properties();
 std::span<const Row> air_formulas();
 std::span<const Row> compositions();
 std::span<const Row> gases();
+std::span<const Row> gas_streams();
 std::span<const Row> diagrams();
 std::span<const Row> fuel_moisture();
 std::span<const Row> fuel_library();

@@ -1,8 +1,8 @@
 // Properties of gases as plain numbers.
 #include "catalogue/sentence.hpp"
+#include "fluid/condensation.hpp"
 #include "functions/functions.hpp"
 #include "functions/gas_arguments.hpp"
-#include "gas/condensation.hpp"
 #include "gas/properties.hpp"
 
 namespace busbar::functions {
@@ -32,7 +32,7 @@ Outcome<Enthalpy> gas_enthalpy(const Mixture& mixture, Temperature t, Word word)
 // With the pressure known, a gas below its dew point is refused.
 template <class Q, Outcome<double> (*kProperty)(const Mixture&, double, double)>
 Outcome<Q> at_pressure(const Mixture& mixture, Pressure p, Temperature t) {
-  const Failure failure = gas::check_condensation(mixture, p.si, t.si);
+  const Failure failure = fluid::check_condensation(mixture, p.si, t.si);
   if (failure.fault != Fault::none) return failure;
   return as<Q>(kProperty(mixture, p.si, t.si));
 }
@@ -55,7 +55,7 @@ Outcome<Temperature> temperature_at_enthalpy(const Mixture& mixture, Enthalpy h,
 Outcome<Temperature> temperature_at_entropy(const Mixture& mixture, Pressure p, Entropy s) {
   const Outcome<double> t = gas::temperature_at_entropy(mixture, p.si, s.si);
   if (!t) return t.failure();
-  const Failure failure = gas::check_condensation(mixture, p.si, *t);
+  const Failure failure = fluid::check_condensation(mixture, p.si, *t);
   if (failure.fault != Fault::none) return failure;
   return Temperature{*t};
 }
@@ -69,7 +69,7 @@ Outcome<Entropy> specific_gas_constant(const Mixture& mixture) {
 }
 
 Outcome<Temperature> dew_point(const Mixture& mixture, Pressure p) {
-  return as<Temperature>(gas::dew_point(mixture, p.si));
+  return as<Temperature>(fluid::dew_point(mixture, p.si));
 }
 
 constexpr const char* kChapter = "Gases";

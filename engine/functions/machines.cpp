@@ -34,6 +34,14 @@ Outcome<Fraction> pump_efficiency(const Stream& inlet, const Stream& outlet) {
   return as<Fraction>(machine::pump_efficiency(inlet, outlet));
 }
 
+Outcome<Stream> compressor_out(const Stream& inlet, Pressure outlet, Fraction efficiency) {
+  return machine::compressor_out(inlet, outlet.si, efficiency.si);
+}
+
+Outcome<Fraction> compressor_efficiency(const Stream& inlet, const Stream& outlet) {
+  return as<Fraction>(machine::compressor_efficiency(inlet, outlet));
+}
+
 Outcome<Stream> valve_out(const Stream& inlet, Pressure outlet) {
   return machine::valve_out(inlet, outlet.si);
 }
@@ -60,6 +68,17 @@ void explain_stage(const Slot* in, const Result& result, UnitSet units, std::str
         "out for an adiabatic machine; weigh the uncertainty of the readings.";
   } else if (result.si < 0) {
     text += " Below 0: as read, the fluid gained enthalpy instead of giving it.";
+  }
+  explain_first_and_second(in, result, units, text);
+}
+
+void explain_compressor(const Slot* in, const Result& result, UnitSet units, std::string& text) {
+  if (result.si > 1) {
+    text +=
+        " Above 1: as read, the compressor would take less than the isentropic power, which the "
+        "second law rules out for an adiabatic machine; weigh the uncertainty of the readings.";
+  } else if (result.si < 0) {
+    text += " Below 0: as read, the fluid lost enthalpy instead of taking it.";
   }
   explain_first_and_second(in, result, units, text);
 }
@@ -91,6 +110,7 @@ constexpr const char* kChapter = "Machines";
 constexpr const char* kBook = "Moran and Shapiro, Fundamentals of Engineering Thermodynamics";
 constexpr Source kTurbine{kBook, "5th ed.", "section 6.8, isentropic turbine efficiency"};
 constexpr Source kPump{kBook, "5th ed.", "section 6.8, isentropic pump efficiency"};
+constexpr Source kCompressor{kBook, "5th ed.", "section 6.8, isentropic compressor efficiency"};
 constexpr Source kThrottle{kBook, "5th ed.", "section 4.3, throttling devices"};
 constexpr Source kEnergy{kBook, "5th ed.", "section 4.2, steady-state energy rate balance"};
 constexpr Source kDefinition{
@@ -160,6 +180,27 @@ constexpr Row kRows[] = {
          {"PUMP_EFFICIENCY(STEAM(1; 30); PUMP_OUT(STEAM(1; 30); 120; 0.8))", "0.8"},
          kFirst},
         kInletOutlet, explain_pump),
+    row<compressor_out>(
+        {"COMPRESSOR_OUT",
+         kChapter,
+         "Stream after an adiabatic compressor",
+         "Outlet enthalpy = inlet enthalpy plus the isentropic rise over the efficiency. A gas or "
+         "superheated steam; what holds liquid is refused.",
+         "A stream",
+         kCompressor,
+         {"COMPRESSOR_OUT(AIR(1.013; 15; 0.6; 650); 18; 0.88)", "gas 650 kg/s, 18 bar"},
+         kFirst},
+        kExpansion, explain_result),
+    row<compressor_efficiency>({"COMPRESSOR_EFFICIENCY",
+                                kChapter,
+                                "Isentropic efficiency of a compressor from its two states",
+                                kMeasuredNote,
+                                "A fraction",
+                                kCompressor,
+                                {"COMPRESSOR_EFFICIENCY(B2; COMPRESSOR_OUT(B2; 18; 0.88))", "0.88",
+                                 "B2=AIR(1.013; 15; 0.6; 650)"},
+                                kFirst},
+                               kInletOutlet, explain_compressor),
     row<valve_out>({"VALVE_OUT",
                     kChapter,
                     "Stream after a valve: same enthalpy, lower pressure",

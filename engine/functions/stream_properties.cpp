@@ -1,28 +1,24 @@
 // Readers of streams for every property, the table of all of them, and exergy.
 #include <string>
 
+#include "fluid/properties.hpp"
+#include "fluid/separation.hpp"
 #include "functions/functions.hpp"
 #include "functions/steam_arguments.hpp"
-#include "water/properties/energy.hpp"
-#include "water/properties/response.hpp"
-#include "water/stream.hpp"
-#include "water/transport/conductivity.hpp"
-#include "water/transport/surface.hpp"
-#include "water/transport/viscosity.hpp"
 
 namespace busbar::functions {
 namespace {
 
-using water::State;
+using fluid::PropertyOf;
+using fluid::State;
 
 // --- Readers ---------------------------------------------------------------------------------
 
-// What the property itself refuses is said of the stream.
 template <class Q, PropertyOf kProperty>
 Outcome<Q> read(const Stream& stream) {
-  const Outcome<State> state = water::state_of(stream);
+  const Outcome<State> state = fluid::state_of(stream);
   if (!state) return state.failure();
-  const Outcome<double> value = kProperty(*state);
+  const Outcome<double> value = kProperty(stream, *state);
   if (!value) return value.failure().about(1);
   return Q{*value};
 }
@@ -31,10 +27,8 @@ Outcome<Q> read(const Stream& stream) {
 
 Outcome<SpecificEnergy> specific_exergy(const Stream& stream, Pressure dead_pressure,
                                         Temperature dead_temperature) {
-  const Outcome<State> state = water::state_of(stream);
-  if (!state) return state.failure();
   const Outcome<double> value =
-      water::specific_exergy(*state, dead_pressure.si, dead_temperature.si);
+      fluid::specific_exergy(stream, dead_pressure.si, dead_temperature.si);
   if (!value) return value.failure();
   return SpecificEnergy{*value};
 }
@@ -49,14 +43,8 @@ Outcome<Power> exergy_flow(const Stream& stream, Pressure dead_pressure,
 
 // --- Table -----------------------------------------------------------------------------------
 
-Outcome<double> pressure(const State& state) { return state.pressure; }
-Outcome<double> temperature(const State& state) { return state.temperature; }
-Outcome<double> volume(const State& state) { return state.volume; }
-Outcome<double> density(const State& state) { return 1 / state.volume; }
-Outcome<double> enthalpy(const State& state) { return state.enthalpy; }
-Outcome<double> entropy(const State& state) { return state.entropy; }
-
-Outcome<double> dryness(const State& state) {
+Outcome<double> dryness(const Stream& stream, const State& state) {
+  if (fluid::is_gas(stream)) return Failure{Fault::missing, 1, "is a gas: there is no dryness"};
   if (state.region != water::Region::two_phase) return no_dryness(state, 1);
   return state.dryness;
 }
@@ -69,41 +57,41 @@ struct Entry {
 
 // The order is that of the table for ever: formulas count its rows.
 constexpr Entry kEntries[] = {
-    {"pressure", Quantity::pressure, pressure},
-    {"temperature", Quantity::temperature, temperature},
-    {"specific volume", Quantity::volume, volume},
-    {"density", Quantity::density, density},
-    {"specific enthalpy", Quantity::enthalpy, enthalpy},
-    {"specific entropy", Quantity::entropy, entropy},
-    {"specific internal energy", Quantity::specific_energy, water::internal_energy},
-    {"specific Helmholtz energy", Quantity::specific_energy, water::helmholtz_energy},
-    {"specific Gibbs energy", Quantity::specific_energy, water::gibbs_energy},
+    {"pressure", Quantity::pressure, fluid::pressure},
+    {"temperature", Quantity::temperature, fluid::temperature},
+    {"specific volume", Quantity::volume, fluid::volume},
+    {"density", Quantity::density, fluid::density},
+    {"specific enthalpy", Quantity::enthalpy, fluid::enthalpy},
+    {"specific entropy", Quantity::entropy, fluid::entropy},
+    {"specific internal energy", Quantity::specific_energy, fluid::internal_energy},
+    {"specific Helmholtz energy", Quantity::specific_energy, fluid::helmholtz_energy},
+    {"specific Gibbs energy", Quantity::specific_energy, fluid::gibbs_energy},
     {"dryness", Quantity::fraction, dryness},
-    {"superheat", Quantity::temperature_difference, water::superheat},
-    {"subcooling", Quantity::temperature_difference, water::subcooling},
-    {"isobaric heat capacity", Quantity::heat_capacity, water::isobaric_heat_capacity},
-    {"isochoric heat capacity", Quantity::heat_capacity, water::isochoric_heat_capacity},
-    {"speed of sound", Quantity::velocity, water::speed_of_sound},
-    {"isentropic exponent", Quantity::number, water::isentropic_exponent},
-    {"Joule-Thomson coefficient", Quantity::joule_thomson, water::joule_thomson},
-    {"isobaric expansion", Quantity::thermal_expansion, water::isobaric_expansion},
-    {"isothermal compressibility", Quantity::compressibility, water::isothermal_compressibility},
-    {"dynamic viscosity", Quantity::viscosity, water::viscosity},
-    {"thermal conductivity", Quantity::thermal_conductivity, water::thermal_conductivity},
-    {"Prandtl number", Quantity::number, water::prandtl_number},
-    {"surface tension", Quantity::surface_tension, water::surface_tension_of},
+    {"superheat", Quantity::temperature_difference, fluid::superheat},
+    {"subcooling", Quantity::temperature_difference, fluid::subcooling},
+    {"isobaric heat capacity", Quantity::heat_capacity, fluid::isobaric_heat_capacity},
+    {"isochoric heat capacity", Quantity::heat_capacity, fluid::isochoric_heat_capacity},
+    {"speed of sound", Quantity::velocity, fluid::speed_of_sound},
+    {"isentropic exponent", Quantity::number, fluid::isentropic_exponent},
+    {"Joule-Thomson coefficient", Quantity::joule_thomson, fluid::joule_thomson},
+    {"isobaric expansion", Quantity::thermal_expansion, fluid::isobaric_expansion},
+    {"isothermal compressibility", Quantity::compressibility, fluid::isothermal_compressibility},
+    {"dynamic viscosity", Quantity::viscosity, fluid::viscosity},
+    {"thermal conductivity", Quantity::thermal_conductivity, fluid::thermal_conductivity},
+    {"Prandtl number", Quantity::number, fluid::prandtl_number},
+    {"surface tension", Quantity::surface_tension, fluid::surface_tension},
 };
 
 // As in STREAM_TABLE, an empty text stands for what the state does not have; the reader of that
 // property says why.
 Outcome<Grid> properties_of(const Stream& stream, UnitSet units) {
-  const Outcome<State> state = water::state_of(stream);
+  const Outcome<State> state = fluid::state_of(stream);
   if (!state) return state.failure();
   Grid table(std::size(kEntries), 3);
   std::size_t r = 0;
   for (const Entry& entry : kEntries) {
     const Unit& unit = unit_of(units, entry.quantity);
-    const Outcome<double> value = entry.property(*state);
+    const Outcome<double> value = entry.property(stream, *state);
     table.at(r, 0) = std::string(entry.name);
     table.at(r, 1) = std::string();
     if (value) table.at(r, 1) = unit.from_si(*value);
@@ -130,13 +118,15 @@ constexpr Source kExergySource{"Definition of flow exergy; states by IAPWS R7-97
                                "section 7.3: h - h0 - T0 (s - s0)"};
 
 constexpr const char* kPhaseNote =
-    "Boiling water (dryness 0) and saturated steam (dryness 1) answer; a mixture has no such "
-    "property: #N/A.";
-constexpr const char* kWetNote = "Wet steam has it too: the mean of its phases by mass.";
+    "Boiling water (dryness 0) and saturated steam (dryness 1) answer; a mixture of the two has no "
+    "such property: #N/A. A gas is ideal.";
+constexpr const char* kWetNote =
+    "Wet steam has it too: the mean of its phases by mass. A gas: on the datum of the stream, see "
+    "ENTHALPY_OF.";
 constexpr const char* kExergyNote =
-    "Against pure water in the dead state, without kinetic, potential and chemical exergy. The "
-    "dead "
-    "state has no default: it changes the answer.";
+    "Thermo-mechanical: against the same fluid in the dead state, without kinetic, potential and "
+    "chemical exergy. A gas keeps its composition; where its dew point is above the dead state, "
+    "part of its water is liquid there. The dead state has no default: it changes the answer.";
 
 constexpr Words words(const char* name, const char* summary, const char* notes, const char* result,
                       const Source& source, const Example& example) {
@@ -149,69 +139,69 @@ consteval Row reader(const Words& words) {
 }
 
 constexpr Row kRows[] = {
-    reader<SpecificEnergy, water::internal_energy>(
+    reader<SpecificEnergy, fluid::internal_energy>(
         words("INTERNAL_ENERGY_OF", "Specific internal energy of a stream", kWetNote,
               "Specific internal energy, zero in the liquid at the triple point", kEnergies,
               {"INTERNAL_ENERGY_OF(STEAM(30; 26.85))", "112.324818"})),
-    reader<SpecificEnergy, water::helmholtz_energy>(
+    reader<SpecificEnergy, fluid::helmholtz_energy>(
         words("HELMHOLTZ_ENERGY_OF", "Specific Helmholtz energy u - T s of a stream", kWetNote,
               "Specific Helmholtz (free) energy", kEnergies,
               {"HELMHOLTZ_ENERGY_OF(STEAM(30; 26.85))", "-5.36361974"})),
-    reader<SpecificEnergy, water::gibbs_energy>(
+    reader<SpecificEnergy, fluid::gibbs_energy>(
         words("GIBBS_ENERGY_OF", "Specific Gibbs energy h - T s of a stream", kWetNote,
               "Specific Gibbs energy (free enthalpy)", kEnergies,
               {"GIBBS_ENERGY_OF(STEAM(30; 26.85))", "-2.35716470"})),
-    reader<HeatCapacity, water::isobaric_heat_capacity>(
+    reader<HeatCapacity, fluid::isobaric_heat_capacity>(
         words("HEAT_CAPACITY_OF", "Isobaric heat capacity cp of a stream", kPhaseNote,
               "Specific heat capacity at constant pressure", kDerivatives,
               {"HEAT_CAPACITY_OF(STEAM(30; 26.85))", "4.17301218"})),
-    reader<HeatCapacity, water::isochoric_heat_capacity>(
+    reader<HeatCapacity, fluid::isochoric_heat_capacity>(
         words("ISOCHORIC_HEAT_CAPACITY_OF", "Isochoric heat capacity cv of a stream", kPhaseNote,
               "Specific heat capacity at constant volume", kDerivatives,
               {"ISOCHORIC_HEAT_CAPACITY_OF(STEAM(200; 346.85))", "3.03793441"})),
-    reader<Velocity, water::speed_of_sound>(
+    reader<Velocity, fluid::speed_of_sound>(
         words("SPEED_OF_SOUND_OF", "Speed of sound in a stream", kPhaseNote, "Velocity",
               kDerivatives, {"SPEED_OF_SOUND_OF(STEAM(30; 26.85))", "1507.73921"})),
-    reader<Number, water::isentropic_exponent>(
+    reader<Number, fluid::isentropic_exponent>(
         words("ISENTROPIC_EXPONENT_OF", "Isentropic exponent of p v^k = constant of a stream",
               kPhaseNote, "Isentropic exponent -(v/p)(dp/dv) at constant entropy", kDerivatives,
               {"ISENTROPIC_EXPONENT_OF(STEAM(0.035; 26.85))", "1.32481456"})),
-    reader<JouleThomson, water::joule_thomson>(
+    reader<JouleThomson, fluid::joule_thomson>(
         words("JOULE_THOMSON_COEFFICIENT_OF",
               "Temperature change per pressure change of a stream in throttling", kPhaseNote,
               "Joule-Thomson coefficient (dT/dp) at constant enthalpy", kDerivatives,
               {"JOULE_THOMSON_COEFFICIENT_OF(STEAM(3; 376.85))", "0.831291340"})),
-    reader<ThermalExpansion, water::isobaric_expansion>(
+    reader<ThermalExpansion, fluid::isobaric_expansion>(
         words("ISOBARIC_EXPANSION_OF", "Isobaric thermal expansion (1/v)(dv/dT) of a stream",
               kPhaseNote, "Thermal expansion coefficient", kDerivatives,
               {"ISOBARIC_EXPANSION_OF(STEAM(200; 346.85))", "0.00621449913"})),
-    reader<Compressibility, water::isothermal_compressibility>(words(
+    reader<Compressibility, fluid::isothermal_compressibility>(words(
         "ISOTHERMAL_COMPRESSIBILITY_OF", "Isothermal compressibility -(1/v)(dv/dp) of a stream",
         kPhaseNote, "Compressibility", kDerivatives,
         {"ISOTHERMAL_COMPRESSIBILITY_OF(STEAM(200; 346.85))", "0.000849501342"})),
-    reader<TemperatureDifference, water::superheat>(
+    reader<TemperatureDifference, fluid::superheat>(
         words("SUPERHEAT_OF", "Degree of superheat of a stream",
               "#N/A for wet steam, for subcooled water, and where the pressure has no saturation "
               "temperature.",
               "Kelvins (or °F) above saturation", kSaturation,
               {"SUPERHEAT_OF(STEAM(10; 300))", "120.114368"})),
-    reader<TemperatureDifference, water::subcooling>(
+    reader<TemperatureDifference, fluid::subcooling>(
         words("SUBCOOLING_OF", "Degree of subcooling of a stream",
               "#N/A for wet steam, for superheated steam, and where the pressure has no saturation "
               "temperature.",
               "Kelvins (or °F) below saturation", kSaturation,
               {"SUBCOOLING_OF(STEAM(10; 150))", "29.8856324"})),
-    reader<Viscosity, water::viscosity>(words("VISCOSITY_OF", "Dynamic viscosity of a stream",
+    reader<Viscosity, fluid::viscosity>(words("VISCOSITY_OF", "Dynamic viscosity of a stream",
                                               kPhaseNote, "Dynamic viscosity", kViscosityRelease,
                                               {"VISCOSITY_OF(STEAM(200; 346.85))", "70.9051068"})),
-    reader<ThermalConductivity, water::thermal_conductivity>(
+    reader<ThermalConductivity, fluid::thermal_conductivity>(
         words("THERMAL_CONDUCTIVITY_OF", "Thermal conductivity of a stream", kPhaseNote,
               "Thermal conductivity", kConductivityRelease,
               {"THERMAL_CONDUCTIVITY_OF(STEAM(200; 346.85))", "0.481485195"})),
-    reader<Number, water::prandtl_number>(
+    reader<Number, fluid::prandtl_number>(
         words("PRANDTL_NUMBER_OF", "Prandtl number of a stream", kPhaseNote, "Prandtl number",
               kPrandtlReleases, {"PRANDTL_NUMBER_OF(STEAM(200; 346.85))", "1.12425779"})),
-    reader<SurfaceTension, water::surface_tension_of>(words(
+    reader<SurfaceTension, fluid::surface_tension>(words(
         "SURFACE_TENSION_OF", "Surface tension between the phases of a wet stream",
         "Boiling water and saturated steam have it too; a single phase away from saturation has "
         "no surface: #N/A.",

@@ -3,16 +3,17 @@
 
 #include "catalogue/sentence.hpp"
 #include "core/text.hpp"
+#include "fluid/join.hpp"
+#include "fluid/properties.hpp"
 #include "functions/describe.hpp"
 #include "functions/functions.hpp"
 #include "functions/sources.hpp"
 #include "machine/balance.hpp"
-#include "water/stream.hpp"
 
 namespace busbar::functions {
 namespace {
 
-using water::State;
+using fluid::State;
 
 // --- Readers ---------------------------------------------------------------------------------
 
@@ -20,22 +21,26 @@ Outcome<Pressure> pressure_of(const Stream& stream) { return Pressure{stream.pre
 Outcome<Temperature> temperature_of(const Stream& stream) {
   return Temperature{stream.temperature};
 }
-Outcome<Enthalpy> enthalpy_of(const Stream& stream) { return Enthalpy{stream.enthalpy}; }
+Outcome<Enthalpy> enthalpy_of(const Stream& stream, const Options& options) {
+  const Outcome<double> h = fluid::shown_enthalpy(stream, options.datum.value_or(stream.datum));
+  if (!h) return h.failure();
+  return Enthalpy{*h};
+}
 
 Outcome<Entropy> entropy_of(const Stream& stream) {
-  const Outcome<State> state = water::state_of(stream);
+  const Outcome<State> state = fluid::state_of(stream);
   if (!state) return state.failure();
   return Entropy{state->entropy};
 }
 
 Outcome<Volume> volume_of(const Stream& stream) {
-  const Outcome<State> state = water::state_of(stream);
+  const Outcome<State> state = fluid::state_of(stream);
   if (!state) return state.failure();
   return Volume{state->volume};
 }
 
 Outcome<Density> density_of(const Stream& stream) {
-  const Outcome<State> state = water::state_of(stream);
+  const Outcome<State> state = fluid::state_of(stream);
   if (!state) return state.failure();
   return Density{1 / state->volume};
 }
@@ -47,14 +52,18 @@ Outcome<Flow> flow_of(const Stream& stream) {
 
 Outcome<Fraction> dryness_of(const Stream& stream) {
   if (stream.phase == Phase::two_phase) return Fraction{stream.dryness};
-  const Outcome<State> state = water::state_of(stream);
+  if (fluid::is_gas(stream)) {
+    return Failure{Fault::missing, 1, "is a gas: there is no dryness"};
+  }
+  const Outcome<State> state = fluid::state_of(stream);
   if (!state) return state.failure();
   return no_dryness(*state, 1);
 }
 
 // --- Table -----------------------------------------------------------------------------------
 
-Outcome<Grid> stream_table(Streams streams, UnitSet units) {
+Outcome<Grid> stream_table(Streams streams, const Options& options) {
+  const UnitSet units = options.units;
   constexpr std::size_t kColumns = 8;
   Grid table(streams.size() + 1, kColumns);
   table.at(0, 0) = std::string("tag");
@@ -67,7 +76,7 @@ Outcome<Grid> stream_table(Streams streams, UnitSet units) {
   table.at(0, 7) = std::string("dryness");
   for (std::size_t i = 0; i < streams.size(); ++i) {
     const Stream& stream = streams[i];
-    const Outcome<State> state = water::state_of(stream);
+    const Outcome<State> state = fluid::state_of(stream);
     if (!state) return state.failure().about(1);
     const std::size_t r = i + 1;
     const auto put = [&](std::size_t column, double si, Quantity quantity) {
@@ -78,7 +87,9 @@ Outcome<Grid> stream_table(Streams streams, UnitSet units) {
     if (stream.flow) put(1, *stream.flow, Quantity::flow);
     put(2, stream.pressure, Quantity::pressure);
     put(3, stream.temperature, Quantity::temperature);
-    put(4, stream.enthalpy, Quantity::enthalpy);
+    const Outcome<double> h = fluid::shown_enthalpy(stream, options.datum.value_or(stream.datum));
+    if (!h) return h.failure().about(1);
+    put(4, *h, Quantity::enthalpy);
     put(5, state->entropy, Quantity::entropy);
     put(6, state->volume, Quantity::volume);
     table.at(r, 7) = std::string();
@@ -144,6 +155,10 @@ void explain_spray(const Slot* in, const Result& result, UnitSet units, std::str
 
 constexpr const char* kChapter = "Streams";
 constexpr const char* kStreamResult = "A stream";
+constexpr const char* kDatumNote =
+    "Water and steam: zero near the triple point, as the steam tables have it. A gas: on the datum "
+    "that the stream carries, with heats of formation unless GAS or AIR was given another; the "
+    "option datum=0 °C (15 °C, 25 °C, formation) shows it on another. Never add the two.";
 constexpr Source kText{"Busbar", "stream text, format 1", "carried exactly by the stream"};
 constexpr Source kBalance{"Conservation of mass and energy in a steady adiabatic mixing chamber",
                           "Moran and Shapiro, Fundamentals of Engineering Thermodynamics",
@@ -190,7 +205,7 @@ constexpr Row kRows[] = {
     row<enthalpy_of>({"ENTHALPY_OF",
                       kChapter,
                       "Specific enthalpy of a stream",
-                      "",
+                      kDatumNote,
                       "Specific enthalpy",
                       kText,
                       {"ENTHALPY_OF(STEAM(30; 26.85))", "115.331273"},
@@ -275,7 +290,9 @@ constexpr Row kRows[] = {
                   kChapter,
                   "Stream that leaves an adiabatic mixing of streams",
                   "Each stream needs a flow. The outlet is at the lowest of their pressures. The "
-                  "tag stays where all tags are the same.",
+                  "tag stays where all tags are the same. Steam and water that join a gas become "
+                  "part of it as vapour, their enthalpy brought to its datum; more water than the "
+                  "gas can hold as vapour is refused.",
                   kStreamResult,
                   kBalance,
                   {"FLOW_OF(MIX_OUT(B2:B3))", "8", "B2=STEAM(10; 300; 5) | B3=STEAM(10; 200; 3)"},

@@ -5,6 +5,9 @@
 namespace busbar::gas {
 namespace {
 
+// Sums of typed fractions are within this of 1.
+constexpr double kRounding = 1e-12;
+
 Failure at_part(Failure failure, std::size_t index) {
   failure.row = static_cast<std::uint32_t>(index + 1);
   return failure;
@@ -60,29 +63,33 @@ Outcome<Mixture> Mixture::from_amounts(std::span<const double, kSpecies> amounts
   if (!(sum > 0) || !std::isfinite(sum)) {
     return Failure{Fault::impossible, 1, "holds no amount of any gas"};
   }
+  if (std::abs(sum - 1) <= kRounding) sum = 1;
   Mixture mixture;
   for (std::size_t i = 0; i < kSpecies; ++i) {
     const double fraction = amounts[i] / sum;
     if (!(fraction > 0)) continue;
-    if (mixture.size_ == kCapacity) {
+    if (!mixture.restore(static_cast<Species>(i), fraction)) {
       return Failure{Fault::too_large,
                      1,
                      "holds more than {0} gases",
                      {{{static_cast<double>(kCapacity), Quantity::number}}}};
     }
-    mixture.species_[mixture.size_] = static_cast<Species>(i);
-    mixture.fraction_[mixture.size_++] = fraction;
-    mixture.molar_mass_ += fraction * gas::molar_mass(static_cast<Species>(i));
   }
   return mixture;
 }
 
+bool Mixture::restore(Species species, double fraction) {
+  if (size_ == kCapacity || !(fraction > 0) || fraction > 1 + kRounding) return false;
+  if (size_ > 0 && species <= species_[size_ - std::size_t{1}]) return false;
+  species_[size_] = species;
+  fraction_[size_++] = fraction;
+  molar_mass_ += fraction * gas::molar_mass(species);
+  return true;
+}
+
 Mixture Mixture::of(Species species) {
   Mixture mixture;
-  mixture.size_ = 1;
-  mixture.species_[0] = species;
-  mixture.fraction_[0] = 1;
-  mixture.molar_mass_ = gas::molar_mass(species);
+  mixture.restore(species, 1);
   return mixture;
 }
 

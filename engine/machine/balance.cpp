@@ -3,6 +3,8 @@
 #include <algorithm>
 #include <cmath>
 
+#include "fluid/join.hpp"
+#include "fluid/state.hpp"
 #include "water/state.hpp"
 #include "water/stream.hpp"
 
@@ -19,6 +21,9 @@ Failure no_flow(std::uint8_t input) {
 }
 
 Outcome<double> common_flow(const Stream& inlet, const Stream& outlet) {
+  if (const Failure other = fluid::refuse_other_fluid(inlet, outlet); other.fault != Fault::none) {
+    return other;
+  }
   if (!inlet.flow) return no_flow(1);
   if (!outlet.flow) return no_flow(2);
   const double larger = std::max(*inlet.flow, *outlet.flow);
@@ -49,6 +54,7 @@ Outcome<Stream> mix_out(std::span<const Stream> streams) {
   if (streams.empty()) return Failure{Fault::missing, 1, "holds no stream"};
   double flow = 0;
   double energy = 0;
+  bool gas = false;
   double pressure = streams.front().pressure;
   Tag tag = streams.front().tag;
   for (std::size_t i = 0; i < streams.size(); ++i) {
@@ -62,10 +68,17 @@ Outcome<Stream> mix_out(std::span<const Stream> streams) {
     }
     flow += *stream.flow;
     energy += *stream.flow * stream.enthalpy;
+    gas = gas || fluid::is_gas(stream);
     pressure = std::min(pressure, stream.pressure);
     if (!(stream.tag == tag)) tag = Tag{};
   }
   if (!(flow > 0)) return Failure{Fault::impossible, 1, "holds streams of zero flow only"};
+  if (gas) {
+    Outcome<Stream> mixed = fluid::mixed_gas(streams, pressure);
+    if (!mixed) return mixed.failure();
+    (*mixed).tag = tag;
+    return mixed;
+  }
   const Outcome<State> state = water::at_pressure_enthalpy(pressure, energy / flow);
   if (!state) return state.failure().about(1);
   return water::stream_of(*state, flow, tag);
@@ -79,6 +92,8 @@ Outcome<Stream> split_out(const Stream& stream, double fraction) {
 }
 
 Outcome<Stream> spray_out(const Stream& steam, const Stream& water, double outlet_temperature) {
+  if (const Failure gas = fluid::refuse_gas(steam, 1); gas.fault != Fault::none) return gas;
+  if (const Failure gas = fluid::refuse_gas(water, 2); gas.fault != Fault::none) return gas;
   if (!steam.flow) return no_flow(1);
   if (water.pressure < steam.pressure) {
     return Failure{Fault::impossible,

@@ -2,13 +2,12 @@
 
 #include <boost/math/differentiation/finite_difference.hpp>
 
-#include "water/state.hpp"
-#include "water/stream.hpp"
+#include "fluid/state.hpp"
 
 namespace busbar::machine {
 namespace {
 
-using water::State;
+using fluid::State;
 
 Failure wrong_pressure(const char* reason, double outlet, double inlet) {
   return {
@@ -17,21 +16,61 @@ Failure wrong_pressure(const char* reason, double outlet, double inlet) {
 
 // The state after an isentropic change to the pressure; its failure is put down to input 2.
 Outcome<State> isentropic_outlet(const Stream& inlet, double outlet_pressure) {
-  const Outcome<State> before = water::state_of(inlet);
+  const Outcome<State> before = fluid::state_of(inlet);
   if (!before) return before.failure().about(1);
-  const Outcome<State> after = water::at_pressure_entropy(outlet_pressure, before->entropy);
+  const Outcome<State> after = fluid::at_pressure_entropy(inlet, outlet_pressure, before->entropy);
   if (!after) return after.failure().about(2);
   return after;
 }
 
 Outcome<Stream> outlet_at(const Stream& inlet, double pressure, double enthalpy) {
-  const Outcome<State> state = water::at_pressure_enthalpy(pressure, enthalpy);
+  const Outcome<State> state = fluid::at_pressure_enthalpy(inlet, pressure, enthalpy);
   if (!state) return state.failure().about(2);
-  return water::moved_to(inlet, *state);
+  return fluid::moved_to(inlet, *state);
 }
 
 constexpr const char* kTurbineRises = "{0} is not below the inlet pressure {1}: a turbine expands";
 constexpr const char* kPumpFalls = "{0} is not above the inlet pressure {1}: a pump raises it";
+constexpr const char* kCompressorFalls =
+    "{0} is not above the inlet pressure {1}: a compressor raises it";
+
+// Isentropic over real rise of enthalpy, for pump and compressor.
+Outcome<double> rise_efficiency(const Stream& inlet, const Stream& outlet) {
+  const Outcome<State> ideal = isentropic_outlet(inlet, outlet.pressure);
+  if (!ideal) return ideal.failure();
+  const double rise = outlet.enthalpy - inlet.enthalpy;
+  if (rise == 0) return Failure{Fault::impossible, 2, "shows no rise of enthalpy at all"};
+  return (ideal->enthalpy - inlet.enthalpy) / rise;
+}
+
+Outcome<Stream> raised(const Stream& inlet, double outlet_pressure, double efficiency) {
+  const Outcome<State> ideal = isentropic_outlet(inlet, outlet_pressure);
+  if (!ideal) return ideal.failure();
+  const double rise = ideal->enthalpy - inlet.enthalpy;
+  return outlet_at(inlet, outlet_pressure, inlet.enthalpy + rise / efficiency);
+}
+
+bool holds_vapour(const Stream& stream) {
+  return stream.phase == Phase::vapour || (stream.phase == Phase::two_phase && stream.dryness > 0);
+}
+
+Failure not_pumped(const Stream& inlet) {
+  if (fluid::is_gas(inlet)) {
+    return {Fault::impossible, 1, "is a gas, which no pump takes; COMPRESSOR_OUT compresses it"};
+  }
+  if (holds_vapour(inlet)) {
+    return {Fault::impossible, 1, "is not a liquid: a pump cannot take steam"};
+  }
+  return {};
+}
+
+Failure not_compressed(const Stream& inlet) {
+  if (inlet.phase == Phase::liquid || inlet.phase == Phase::two_phase) {
+    return {Fault::impossible, 1,
+            "holds liquid, which no compressor takes; PUMP_OUT raises the pressure of a liquid"};
+  }
+  return {};
+}
 
 }  // namespace
 
@@ -46,6 +85,9 @@ Outcome<Stream> turbine_out(const Stream& inlet, double outlet_pressure, double 
 }
 
 Outcome<double> turbine_efficiency(const Stream& inlet, const Stream& outlet) {
+  if (const Failure other = fluid::refuse_other_fluid(inlet, outlet); other.fault != Fault::none) {
+    return other;
+  }
   if (!(outlet.pressure < inlet.pressure)) {
     return wrong_pressure(kTurbineRises, outlet.pressure, inlet.pressure);
   }
@@ -57,38 +99,53 @@ Outcome<double> turbine_efficiency(const Stream& inlet, const Stream& outlet) {
 }
 
 Outcome<Stream> pump_out(const Stream& inlet, double outlet_pressure, double efficiency) {
-  if (inlet.phase == Phase::vapour || (inlet.phase == Phase::two_phase && inlet.dryness > 0)) {
-    return Failure{Fault::impossible, 1, "is not a liquid: a pump cannot take steam"};
-  }
+  if (const Failure other = not_pumped(inlet); other.fault != Fault::none) return other;
   if (!(outlet_pressure > inlet.pressure)) {
     return wrong_pressure(kPumpFalls, outlet_pressure, inlet.pressure);
   }
-  const Outcome<State> ideal = isentropic_outlet(inlet, outlet_pressure);
-  if (!ideal) return ideal.failure();
-  const double rise = ideal->enthalpy - inlet.enthalpy;
-  return outlet_at(inlet, outlet_pressure, inlet.enthalpy + rise / efficiency);
+  return raised(inlet, outlet_pressure, efficiency);
+}
+
+Outcome<Stream> compressor_out(const Stream& inlet, double outlet_pressure, double efficiency) {
+  if (const Failure other = not_compressed(inlet); other.fault != Fault::none) return other;
+  if (!(outlet_pressure > inlet.pressure)) {
+    return wrong_pressure(kCompressorFalls, outlet_pressure, inlet.pressure);
+  }
+  return raised(inlet, outlet_pressure, efficiency);
+}
+
+Outcome<double> compressor_efficiency(const Stream& inlet, const Stream& outlet) {
+  if (const Failure other = fluid::refuse_other_fluid(inlet, outlet); other.fault != Fault::none) {
+    return other;
+  }
+  if (const Failure other = not_compressed(inlet); other.fault != Fault::none) return other;
+  if (!(outlet.pressure > inlet.pressure)) {
+    return wrong_pressure(kCompressorFalls, outlet.pressure, inlet.pressure);
+  }
+  return rise_efficiency(inlet, outlet);
 }
 
 Outcome<double> pump_efficiency(const Stream& inlet, const Stream& outlet) {
+  if (const Failure other = fluid::refuse_other_fluid(inlet, outlet); other.fault != Fault::none) {
+    return other;
+  }
+  if (fluid::is_gas(inlet)) return not_pumped(inlet);
   if (!(outlet.pressure > inlet.pressure)) {
     return wrong_pressure(kPumpFalls, outlet.pressure, inlet.pressure);
   }
-  const Outcome<State> ideal = isentropic_outlet(inlet, outlet.pressure);
-  if (!ideal) return ideal.failure();
-  const double rise = outlet.enthalpy - inlet.enthalpy;
-  if (rise == 0) return Failure{Fault::impossible, 2, "shows no rise of enthalpy at all"};
-  return (ideal->enthalpy - inlet.enthalpy) / rise;
+  return rise_efficiency(inlet, outlet);
 }
 
 Outcome<double> pump_efficiency_per_kelvin(const Stream& inlet, const Stream& outlet) {
   Failure failure;
   const auto efficiency = [&](double temperature) {
-    const Outcome<State> state = water::at_pressure_temperature(outlet.pressure, temperature);
+    const Outcome<State> state =
+        fluid::at_pressure_temperature(outlet, outlet.pressure, temperature);
     if (!state) {
       failure = state.failure().about(2);
       return 0.0;
     }
-    const Outcome<double> found = pump_efficiency(inlet, water::moved_to(outlet, *state));
+    const Outcome<double> found = pump_efficiency(inlet, fluid::moved_to(outlet, *state));
     if (!found) failure = found.failure();
     return found ? *found : 0.0;
   };

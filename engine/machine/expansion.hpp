@@ -1,4 +1,5 @@
-// Machines that change the pressure of one stream: turbine, pump, valve.
+// Machines that change the pressure of one stream of water, steam or gas: turbine, pump,
+// compressor, valve.
 //
 // Inputs of the functions below are numbered as written: 1 inlet, 2 outlet or outlet pressure (Pa),
 // 3 isentropic efficiency (fraction). Efficiencies compare the enthalpy change with that of the
@@ -22,6 +23,12 @@ Outcome<Stream> pump_out(const Stream& inlet, double outlet_pressure, double eff
 
 /// (h2s - h1) / (h2 - h1).
 Outcome<double> pump_efficiency(const Stream& inlet, const Stream& outlet);
+
+/// h2 = h1 + (h2s - h1) / eta. The inlet must be a gas, superheated steam or supercritical.
+Outcome<Stream> compressor_out(const Stream& inlet, double outlet_pressure, double efficiency);
+
+/// (h2s - h1) / (h2 - h1).
+Outcome<double> compressor_efficiency(const Stream& inlet, const Stream& outlet);
 
 /// Change of the pump efficiency for one kelvin more of outlet temperature.
 Outcome<double> pump_efficiency_per_kelvin(const Stream& inlet, const Stream& outlet);

@@ -9,11 +9,13 @@
 
 #include "core/outcome.hpp"
 #include "core/units.hpp"
+#include "gas/datum.hpp"
+#include "gas/mixture.hpp"
 
 namespace busbar {
 
 /// What the readable part calls the fluid.
-enum class Phase : std::uint8_t { liquid, vapour, two_phase, supercritical, count_ };
+enum class Phase : std::uint8_t { liquid, vapour, two_phase, supercritical, gas, count_ };
 
 /// A plant code or another short name that travels with a stream. Kept inside the stream so that
 /// passing streams around never allocates.
@@ -36,8 +38,13 @@ class Tag {
   std::array<char, kLimit> bytes_{};
 };
 
-/// A stream of water or steam. SI: Pa, K, J/kg, kg/s. `dryness` is NaN outside the two-phase
-/// region.
+/// A stream of water or steam, or of a gas (Phase::gas). SI: Pa, K, J/kg, kg/s. `dryness` is NaN
+/// outside the two-phase region; `mixture` is empty but for a gas.
+///
+/// The enthalpy of water is that of the steam tables, zero near the triple point of the liquid. The
+/// enthalpy of a gas always holds its heat of formation, so that gases of different composition
+/// balance; `datum` only says how readers show it. The two are 16 MJ per kg of water apart:
+/// fluid/join.hpp converts.
 struct Stream {
   Phase phase = Phase::liquid;
   double pressure = 0;
@@ -46,6 +53,8 @@ struct Stream {
   double dryness = std::numeric_limits<double>::quiet_NaN();
   std::optional<double> flow;
   Tag tag;
+  gas::Datum datum = gas::Datum::formation;
+  gas::Mixture mixture;
   UnitSet face = UnitSet::metric;  ///< unit set of the readable part that it was read from
 };
 

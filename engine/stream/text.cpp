@@ -6,6 +6,7 @@
 
 #include "core/text.hpp"
 #include "stream/check_digits.hpp"
+#include "stream/gas_text.hpp"
 
 namespace busbar {
 namespace {
@@ -15,7 +16,7 @@ constexpr std::string_view kVersion = "1";
 constexpr std::string_view kDryness = "dryness ";
 
 constexpr std::array<std::string_view, static_cast<std::size_t>(Phase::count_)> kFluids{
-    "water", "steam", "wet steam", "supercritical water"};
+    "water", "steam", "wet steam", "supercritical water", "gas"};
 
 void append_quantity(std::string& out, double si, Quantity quantity, UnitSet set) {
   const Unit& unit = unit_of(set, quantity);
@@ -57,9 +58,11 @@ void append_body(std::string& out, const Stream& stream, UnitSet set) {
   out += kVersion;
   append_field(out, " p=", stream.pressure);
   append_field(out, " t=", stream.temperature);
-  append_field(out, " h=", stream.enthalpy);
+  const bool gas = stream.phase == Phase::gas;
+  append_field(out, gas ? " hf=" : " h=", stream.enthalpy);
   if (stream.phase == Phase::two_phase) append_field(out, " x=", stream.dryness);
   if (stream.flow) append_field(out, " m=", *stream.flow);
+  if (gas) append_gas(out, stream);
   out += ' ';
 }
 
@@ -107,13 +110,17 @@ Failure read_tail(std::string_view tail, Stream& stream, std::string_view& digit
     return damaged("is in a stream format that this version of Busbar does not know");
   }
   tail.remove_prefix(space);
-  if (!take_field(tail, " p=", stream.pressure) || !take_field(tail, " t=", stream.temperature) ||
-      !take_field(tail, " h=", stream.enthalpy)) {
+  if (!take_field(tail, " p=", stream.pressure) || !take_field(tail, " t=", stream.temperature)) {
     return damaged(kCut);
+  }
+  if (!take_field(tail, " h=", stream.enthalpy)) {
+    if (!take_field(tail, " hf=", stream.enthalpy)) return damaged(kCut);
+    stream.phase = Phase::gas;
   }
   if (take_field(tail, " x=", stream.dryness)) stream.phase = Phase::two_phase;
   double flow = 0;
   if (take_field(tail, " m=", flow)) stream.flow = flow;
+  if (stream.phase == Phase::gas && !take_gas(tail, stream)) return damaged(kCut);
   if (tail.substr(0, 2) != " #" || tail.size() != 2 + kCheckDigits) return damaged(kCut);
   digits = tail.substr(2);
   return {};
@@ -298,6 +305,9 @@ Outcome<Stream> read_stream(std::string_view text) {
   }
   if ((face.phase == Phase::two_phase) != (stream.phase == Phase::two_phase)) {
     return damaged("was edited or damaged: only one of its two parts is wet");
+  }
+  if ((face.phase == Phase::gas) != (stream.phase == Phase::gas)) {
+    return damaged("was edited or damaged: only one of its two parts is a gas");
   }
   stream.phase = face.phase;
   // The digits cover the face: where they fit, its numbers need not be read.

@@ -21,6 +21,9 @@ Phase phase_of(const State& state) {
 }  // namespace
 
 Outcome<State> state_of(const Stream& stream) {
+  if (stream.phase == Phase::gas) {
+    return Failure{Fault::wrong_kind, 1, "is a gas where water or steam is needed"};
+  }
   Outcome<State> state =
       stream.phase == Phase::two_phase
           ? at_pressure_dryness(stream.pressure, stream.dryness)

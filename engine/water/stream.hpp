@@ -11,7 +11,7 @@ namespace busbar::water {
 
 /// The full state of a stream, found from what its text carries exactly: pressure and dryness where
 /// it is wet, pressure and enthalpy elsewhere, where the temperature only spares an iteration.
-/// Failures as at_pressure_enthalpy, argument 1.
+/// Failures as at_pressure_enthalpy, argument 1; a gas is wrong_kind (fluid/state.hpp takes both).
 Outcome<State> state_of(const Stream& stream);
 
 /// A stream in a state.

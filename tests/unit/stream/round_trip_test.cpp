@@ -29,6 +29,9 @@ void expect_same(const Stream& a, const Stream& b, const std::string& text) {
     EXPECT_TRUE(same(*a.flow, *b.flow)) << text;
   }
   EXPECT_EQ(a.tag.text(), b.tag.text()) << text;
+  EXPECT_EQ(a.mixture, b.mixture) << text;
+  EXPECT_EQ(a.mixture.molar_mass(), b.mixture.molar_mass()) << text;
+  EXPECT_EQ(a.datum, b.datum) << text;
 }
 
 TEST(StreamText, ComesBackExactlyInEveryUnitSet) {

@@ -1,6 +1,7 @@
 // Random streams for the tests of their text.
 #pragma once
 
+#include <array>
 #include <string>
 
 #include "random.hpp"
@@ -19,6 +20,16 @@ inline UnitSet unit_set(support::Random& random) {
   return static_cast<UnitSet>(random.below(static_cast<std::size_t>(UnitSet::count_)));
 }
 
+// Up to as many species as a stream can hold.
+inline gas::Mixture mixture(support::Random& random) {
+  std::array<double, gas::kSpecies> amounts{};
+  const std::size_t count = 1 + random.below(gas::Mixture::kCapacity);
+  for (std::size_t k = 0; k < count; ++k) {
+    amounts[random.below(gas::kSpecies)] = random.logarithmic(1e-7, 1);
+  }
+  return *gas::Mixture::from_amounts(amounts);
+}
+
 // The numbers need not be those of water: the text carries what it is given.
 inline Stream stream(support::Random& random) {
   Stream out;
@@ -28,6 +39,11 @@ inline Stream stream(support::Random& random) {
   out.enthalpy = random.uniform(-1e4, 7e6);
   if (out.phase == Phase::two_phase) {
     out.dryness = random.chance(0.1) ? double(random.chance(0.5)) : random.uniform(0, 1);
+  }
+  if (out.phase == Phase::gas) {
+    out.mixture = mixture(random);
+    out.datum = static_cast<gas::Datum>(random.below(static_cast<std::size_t>(gas::Datum::count_)));
+    out.enthalpy = random.uniform(-1.7e7, 2e8);
   }
   if (random.chance(0.6)) out.flow = random.chance(0.05) ? 0.0 : random.logarithmic(1e-6, 1e6);
   if (random.chance(0.5)) {

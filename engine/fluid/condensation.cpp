@@ -1,11 +1,11 @@
-#include "gas/condensation.hpp"
+#include "fluid/condensation.hpp"
 
 #include <cmath>
 
 #include "water/state.hpp"
 #include "water/transport/surface.hpp"
 
-namespace busbar::gas {
+namespace busbar::fluid {
 namespace {
 
 constexpr double kFreezing = 273.15;
@@ -46,8 +46,8 @@ Outcome<double> water_saturation_pressure(double temperature) {
                                  : water::saturation_pressure(temperature);
 }
 
-Outcome<double> dew_point(const Mixture& mixture, double pressure) {
-  const double fraction = mixture.mole_fraction(Species::H2O);
+Outcome<double> dew_point(const gas::Mixture& mixture, double pressure) {
+  const double fraction = mixture.mole_fraction(gas::Species::H2O);
   if (fraction == 0) return Failure{Fault::missing, 1, "holds no water: there is no dew point"};
   const double partial = fraction * pressure;
   static const double freezing = *water::saturation_pressure(kFreezing);
@@ -70,9 +70,9 @@ Outcome<double> dew_point(const Mixture& mixture, double pressure) {
       {{measure}}};
 }
 
-Failure check_condensation(const Mixture& mixture, double pressure, double temperature) {
+Failure check_condensation(const gas::Mixture& mixture, double pressure, double temperature) {
   if (temperature >= kCritical) return {};
-  const double fraction = mixture.mole_fraction(Species::H2O);
+  const double fraction = mixture.mole_fraction(gas::Species::H2O);
   if (fraction == 0) return {};
   const Outcome<double> saturation = water_saturation_pressure(temperature);
   if (!saturation || fraction * pressure <= *saturation * (1 + kSaturated)) return {};
@@ -80,4 +80,4 @@ Failure check_condensation(const Mixture& mixture, double pressure, double tempe
   return condensed(temperature, dew ? *dew : kCritical);
 }
 
-}  // namespace busbar::gas
+}  // namespace busbar::fluid
