@@ -1,6 +1,7 @@
 #include "fluid/properties.hpp"
 
 #include "gas/properties.hpp"
+#include "gas/transport.hpp"
 #include "water/properties/energy.hpp"
 #include "water/properties/response.hpp"
 #include "water/transport/conductivity.hpp"
@@ -111,17 +112,17 @@ Outcome<double> isothermal_compressibility(const Stream& stream, const State& st
 
 Outcome<double> viscosity(const Stream& stream, const State& state) {
   return either(stream, state, water::viscosity,
-                [] { return gas_has_no("is a gas, for which no viscosity is given"); });
+                [&] { return gas::viscosity(stream.mixture, state.temperature); });
 }
 
 Outcome<double> thermal_conductivity(const Stream& stream, const State& state) {
   return either(stream, state, water::thermal_conductivity,
-                [] { return gas_has_no("is a gas, for which no conductivity is given"); });
+                [&] { return gas::thermal_conductivity(stream.mixture, state.temperature); });
 }
 
 Outcome<double> prandtl_number(const Stream& stream, const State& state) {
   return either(stream, state, water::prandtl_number,
-                [] { return gas_has_no("is a gas, for which no Prandtl number is given"); });
+                [&] { return gas::prandtl_number(stream.mixture, state.temperature); });
 }
 
 Outcome<double> surface_tension(const Stream& stream, const State& state) {

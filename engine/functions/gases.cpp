@@ -4,6 +4,7 @@
 #include "functions/functions.hpp"
 #include "functions/gas_arguments.hpp"
 #include "gas/properties.hpp"
+#include "gas/transport.hpp"
 
 namespace busbar::functions {
 namespace {
@@ -105,6 +106,17 @@ constexpr Source kDewSource{
     "Dalton's law; saturation by IAPWS R7-97(2012) and IAPWS R14-08(2011)", "2012; 2011",
     "partial pressure of water at saturation; enhancement by the other gases left out"};
 
+constexpr Source kTransport{
+    "E. W. Lemmon and R. T. Jacobsen, Int. J. Thermophys. 25; A. Fenghour et al., J. Phys. Chem. "
+    "Ref. Data 27; IAPWS R12-08 and R15-11; R. A. Svehla, NASA TR R-132; C. R. Wilke, J. Chem. "
+    "Phys. 18",
+    "2004; 1998; 2008 and 2011; 1962; 1950",
+    "dilute-gas terms and Wilke's rule; coefficients from memory"};
+constexpr const char* kTransportNote =
+    "At low pressure: up to 10 bar the pressure adds less than 2 % above 0 °C. Wilke's rule is "
+    "good to about 2 % in viscosity; conductivities are good to about 5 %. Compositions of N2, O2, "
+    "Ar, CO2, H2O, CO, H2, CH4, SO2, NO, He and Ne; with water from 0 °C to 900 °C.";
+
 constexpr Words words(const char* name, const char* summary, const char* notes, const char* result,
                       const Source& source, const Example& example) {
   return {name, kChapter, summary, notes, result, source, example, kFirst};
@@ -151,6 +163,20 @@ constexpr Row kRows[] = {
               "Ideal gas. Refused below the dew point.", "Density", kNasaPolynomials,
               {"GAS_DENSITY(\"mole: N2 0.79, O2 0.21\"; 10; 500)", "4.48797496"}),
         kCompositionPressureTemperature, explain_gas),
+    row<at_temperature<Viscosity, gas::viscosity>>(
+        words("GAS_VISCOSITY", "Dynamic viscosity of a gas at low pressure", kTransportNote,
+              "Dynamic viscosity", kTransport, {"GAS_VISCOSITY(\"mole: N2 1\"; 26.85)", "17.8770"}),
+        kCompositionTemperature, explain_gas),
+    row<at_temperature<ThermalConductivity, gas::thermal_conductivity>>(
+        words("GAS_THERMAL_CONDUCTIVITY", "Thermal conductivity of a gas at low pressure",
+              kTransportNote, "Thermal conductivity", kTransport,
+              {"GAS_THERMAL_CONDUCTIVITY(\"mole: N2 1\"; 26.85)", "0.025936"}),
+        kCompositionTemperature, explain_gas),
+    row<at_temperature<Number, gas::prandtl_number>>(
+        words("GAS_PRANDTL_NUMBER", "Prandtl number of a gas at low pressure", kTransportNote,
+              "Prandtl number", kTransport,
+              {"GAS_PRANDTL_NUMBER(\"mole: Ar 1\"; 26.85)", "0.664118"}),
+        kCompositionTemperature, explain_gas),
     row<temperature_at_enthalpy>(
         words("GAS_TEMPERATURE_AT_ENTHALPY", "Temperature of a gas at an enthalpy", kVapourNote,
               "Temperature", kNasaPolynomials,
