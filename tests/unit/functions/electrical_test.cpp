@@ -46,7 +46,8 @@ TEST(ElectricalSlips, PolesComeInPairs) {
 TEST(ElectricalSlips, LossesInAnotherUnitAreNoticed) {
   expect_reason("GENERATOR_BEST_LOAD(150; 0.8; {0.4 | 0.3 | 0.3 | 0.2 | 0.4 | 0.1}; 0.4)",
                 {"losses adds up to 1.7 kW", "120 MW", "unit of the losses"});
-  expect_reason("GENERATOR_BEST_LOAD(150; 0.8; {1700}; 0.4)", {"needs six numbers and has 1", "core"});
+  expect_reason("GENERATOR_BEST_LOAD(150; 0.8; {1700}; 0.4)",
+                {"needs six numbers and has 1", "core"});
   expect_reason("TRANSFORMER_PEAK_EFFICIENCY(160; 75000; 420000)", {"load loss", "160 MVA"});
 }
 
