@@ -1,8 +1,5 @@
 """The workbook generator-losses.ods: an invented generator from its test losses to the busbar."""
 
-import os
-import re
-
 from generator_losses import chain, curve, evidence, figures, inputs, losses
 from styles import Styles, set_up_page
 
@@ -11,13 +8,6 @@ FOOTER = (
     "For appraisal only; never for the setting of protection. High voltage: local codes and licensed "
     "practice govern."
 )
-
-
-def version():
-    """The version of this tree."""
-    top = os.path.dirname(os.path.dirname(os.path.dirname(os.path.dirname(os.path.abspath(__file__)))))
-    with open(os.path.join(top, "CMakeLists.txt"), encoding="utf-8") as file:
-        return re.search(r"project\(\s*busbar\s+VERSION\s+([\d.]+)", file.read(), re.IGNORECASE).group(1)
 
 
 def build(document):
@@ -31,7 +21,7 @@ def build(document):
         document.add_sheet(module.NAME)
     styles = Styles(model)
 
-    front = losses.Losses(document, styles, version())
+    front = losses.Losses(document, styles)
     parts = (
         inputs.Inputs(document, styles),
         chain.Chain(document, styles),

@@ -21,9 +21,8 @@ MET, TOLERATED, MISSED = "met", "within tolerance", "missed"
 
 
 class Losses:
-    def __init__(self, document, styles, version):
+    def __init__(self, document, styles):
         self.page = Page(document, styles, NAME)
-        self.version = version
 
     def build(self):
         page = self.page
@@ -40,7 +39,7 @@ class Losses:
             page.put(f"A{row}", label, "label")
             page.put(f"B{row}", text, "input left", name=name, merge=f"F{row}")
         page.put("G3", "Engine", "label")
-        page.put("H3", f"Busbar {self.version}; IEC 60034-2-1, 60034-1, 60076-1", "result text",
+        page.put("H3", '=ENGINE_VERSION()&"; IEC 60034-2-1, 60034-1, 60076-1"', "result text",
                  name="engine_version", merge="K3")
         page.put("G4", "Data", "label")
         page.put("H4", "Site, documents and every figure are invented.", "result text", merge="K4")
@@ -161,7 +160,7 @@ class Losses:
         chart = Chart(page.document, page.sheet, "efficiency", (0, top + 0.1), (width, CHART_HEIGHT - 0.2))
         chart.title("Efficiency of the generator over load")
         chart.axis("X", "Apparent power over rated apparent power, %", 0.2, 1.1, 0.1, "0 %")
-        chart.axis("Y", "Efficiency by summation of losses, %", 0.965, 0.992, 0.005, "0.0 %")
+        chart.axis("Y", "Efficiency, %", 0.965, 0.992, 0.005, "0.0 %")
         for (loads, efficiencies, legend), color, dash in zip(
             curve.lines(), (PLUM, OCHRE, SLATE), (None, STROKE, None)
         ):

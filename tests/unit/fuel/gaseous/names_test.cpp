@@ -75,8 +75,8 @@ TEST(GasNames, WhatIsAmbiguousIsRefusedWithAHint) {
     EXPECT_NE(std::string(component.failure().reason).find("several substances"),
               std::string::npos);
   }
-  EXPECT_EQ(component_named("C6+").failure().reason, kGroup);
-  EXPECT_EQ(component_named("air").failure().reason, kMixtureName);
+  EXPECT_STREQ(component_named("C6+").failure().reason, kGroup);
+  EXPECT_STREQ(component_named("air").failure().reason, kMixtureName);
 }
 
 TEST(GasNames, AnythingElseIsUnknown) {
