@@ -151,8 +151,8 @@ TEST_P(BadInput, AnExtremeNumberIsComputedOrRefused) {
       const bool absent = reason.find("there is no") != std::string::npos ||
                           reason.find("is left out") != std::string::npos;
       // One number where a function needs a range of several has the wrong shape.
-      const bool shape = row().types[i].kind == Kind::numbers &&
-                         (i >= good.size() || good[i].rows() > 1);
+      const bool shape =
+          row().types[i].kind == Kind::numbers && (i >= good.size() || good[i].rows() > 1);
       const std::string_view word = support::error_word(result.error_at());
       if (shape && word == "#VALUE!") continue;
       EXPECT_EQ(word, absent ? "#N/A" : "Err:502") << reason;
