@@ -66,7 +66,8 @@ class Function:
     def example_arguments(self):
         """The arguments of this function's own call in its example, as formula texts."""
         at = self.example.index(self.name + "(") + len(self.name) + 1
-        return split_arguments(self.example[at:])
+        parts = split_arguments(self.example[at:])
+        return [] if parts == [""] else parts
 
 
 def split_arguments(text):

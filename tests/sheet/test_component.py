@@ -54,7 +54,7 @@ class Registration(SheetCase):
                 self.assertIn(name, wizard)
                 entry = wizard[name][0]
                 self.assertTrue(entry["Description"])
-                shown = [(a.Name, a.Description) for a in entry["Arguments"]]
+                shown = [(a.Name, a.Description) for a in entry["Arguments"] or ()]
                 self.assertEqual(shown, arguments)
                 for argument, description in shown:
                     self.assertTrue(argument and description)
