@@ -3,17 +3,12 @@
 #include "air/cipm.hpp"
 #include "air/perfect_gas.hpp"
 #include "air/saturation.hpp"
+#include "functions/as.hpp"
 #include "functions/functions.hpp"
 #include "functions/humid_air_arguments.hpp"
 
 namespace busbar::functions {
 namespace {
-
-template <class Q>
-Outcome<Q> as(const Outcome<double>& outcome) {
-  if (!outcome) return outcome.failure();
-  return Q{*outcome};
-}
 
 Outcome<Enthalpy> enthalpy_ashrae(Temperature t, Number ratio) {
   return Enthalpy{air::perfect_gas_enthalpy(t.si, ratio.si)};

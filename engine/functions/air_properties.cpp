@@ -4,6 +4,7 @@
 
 #include "air/humidity.hpp"
 #include "air/properties.hpp"
+#include "functions/as.hpp"
 #include "functions/functions.hpp"
 #include "functions/humid_air_arguments.hpp"
 
@@ -11,12 +12,6 @@ namespace busbar::functions {
 namespace {
 
 using OptionalWord = std::optional<Word>;
-
-template <class Q>
-Outcome<Q> as(const Outcome<double>& outcome) {
-  if (!outcome) return outcome.failure();
-  return Q{*outcome};
-}
 
 Outcome<Enthalpy> enthalpy(Pressure p, Temperature t, Number ratio) {
   return as<Enthalpy>(air::enthalpy_at(p.si, t.si, ratio.si));

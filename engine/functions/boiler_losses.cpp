@@ -8,6 +8,7 @@
 #include "catalogue/sentence.hpp"
 #include "combustion/acid_dew_point.hpp"
 #include "core/text.hpp"
+#include "functions/as.hpp"
 #include "functions/functions.hpp"
 #include "functions/sources.hpp"
 
@@ -16,22 +17,17 @@ namespace {
 
 using combustion::AcidDewPoint;
 
-Outcome<Fraction> as_fraction(const Outcome<double>& outcome) {
-  if (!outcome) return outcome.failure();
-  return Fraction{*outcome};
-}
-
 // --- Siegert ---------------------------------------------------------------------------------
 
 Outcome<Fraction> siegert_loss(Word fuel, Temperature gas, Temperature air, Fraction oxygen,
                                std::optional<Fraction> moisture) {
   const double water = moisture ? moisture->si : std::numeric_limits<double>::quiet_NaN();
-  return as_fraction(boiler::siegert_loss(fuel, gas.si, air.si, oxygen.si, water));
+  return as<Fraction>(boiler::siegert_loss(fuel, gas.si, air.si, oxygen.si, water));
 }
 
 Outcome<Fraction> siegert_loss_from_co2(Word fuel, Temperature gas, Temperature air,
                                         Fraction carbon_dioxide) {
-  return as_fraction(
+  return as<Fraction>(
       boiler::siegert_loss_by_carbon_dioxide(fuel, gas.si, air.si, carbon_dioxide.si));
 }
 

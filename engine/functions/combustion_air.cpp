@@ -1,5 +1,6 @@
 // How much air a fuel needs, and how much it was given.
 #include "combustion/reading.hpp"
+#include "functions/as.hpp"
 #include "functions/combustion_arguments.hpp"
 #include "functions/functions.hpp"
 
@@ -8,12 +9,6 @@ namespace {
 
 using gas::Mixture;
 using gas::Species;
-
-template <class Q>
-Outcome<Q> as(const Outcome<double>& value) {
-  if (!value) return value.failure();
-  return Q{*value};
-}
 
 Outcome<Number> stoichiometric_oxygen(const Composition& analysis) {
   const Outcome<combustion::Fuel> fuel = combustion::fuel_from(analysis);

@@ -4,6 +4,7 @@
 #include "catalogue/sentence.hpp"
 #include "core/text.hpp"
 #include "electrical/generator.hpp"
+#include "functions/describe.hpp"
 #include "functions/electrical_arguments.hpp"
 #include "functions/functions.hpp"
 #include "functions/sources.hpp"
@@ -79,13 +80,6 @@ Outcome<ComponentPower> generator_loss_at_load(ApparentPower rated, Fraction rat
   const auto found = balance(rated, rated_factor, losses, field_ratio, share, factor, sense);
   if (!found) return found.failure();
   return ComponentPower{found->total};
-}
-
-std::string heading(std::string_view name, Quantity quantity, UnitSet units) {
-  std::string text(name);
-  text += ", ";
-  text += unit_of(units, quantity).symbol;
-  return text;
 }
 
 Outcome<Grid> generator_loss_table(ApparentPower rated, Fraction rated_factor, StatedLosses losses,

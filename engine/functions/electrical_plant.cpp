@@ -7,6 +7,7 @@
 #include "electrical/motor_classes.hpp"
 #include "electrical/transformer.hpp"
 #include "electrical/typical.hpp"
+#include "functions/describe.hpp"
 #include "functions/electrical_arguments.hpp"
 #include "functions/functions.hpp"
 #include "functions/sources.hpp"
@@ -70,13 +71,6 @@ Outcome<Power> house_load(Numbers<ComponentPower> shaft_powers, Numbers<Fraction
   const auto found = electrical::house_load(shaft_powers.si, efficiencies.si);
   if (!found) return found.failure();
   return Power{*found};
-}
-
-std::string heading(std::string_view name, Quantity quantity, UnitSet units) {
-  std::string text(name);
-  text += ", ";
-  text += unit_of(units, quantity).symbol;
-  return text;
 }
 
 Outcome<Grid> shaft_to_busbar(Power shaft, Numbers<ComponentPower> generator_losses,

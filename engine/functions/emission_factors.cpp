@@ -5,6 +5,7 @@
 #include "emission/epa.hpp"
 #include "emission/ipcc.hpp"
 #include "fuel/basis.hpp"
+#include "functions/describe.hpp"
 #include "functions/functions.hpp"
 #include "functions/sources.hpp"
 #include "units/expression.hpp"
@@ -65,13 +66,6 @@ void explain_ipcc(const Slot* in, const Result&, UnitSet, std::string& text) {
                 : "This default: one transcription; the CO2 factor follows from the carbon content "
                   "times 44/12 within 0.3 %.";
   if ((*fuel)->biogenic) text += " Biogenic: reported apart and not counted in the total.";
-}
-
-std::string heading(std::string_view what, Quantity quantity, UnitSet units) {
-  std::string text(what);
-  text += ", ";
-  text += unit_of(units, quantity).symbol;
-  return text;
 }
 
 // The table of those that `take` chooses, or of the one whose name it is.

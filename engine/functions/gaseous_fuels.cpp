@@ -4,6 +4,7 @@
 #include "fuel/gaseous/constants.hpp"
 #include "fuel/gaseous/gpa_2145.hpp"
 #include "fuel/gaseous/properties.hpp"
+#include "functions/as.hpp"
 #include "functions/functions.hpp"
 #include "functions/gaseous_fuel_arguments.hpp"
 
@@ -11,12 +12,6 @@ namespace busbar::functions {
 namespace {
 
 namespace gaseous = fuel::gaseous;
-
-template <class Q>
-Outcome<Q> as(const Outcome<double>& outcome) {
-  if (!outcome) return outcome.failure();
-  return Q{*outcome};
-}
 
 Outcome<MolarMass> molar_mass(const Composition& analysis) {
   const GasReading read(analysis);

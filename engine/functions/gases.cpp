@@ -1,6 +1,7 @@
 // Properties of gases as plain numbers.
 #include "catalogue/sentence.hpp"
 #include "fluid/condensation.hpp"
+#include "functions/as.hpp"
 #include "functions/functions.hpp"
 #include "functions/gas_arguments.hpp"
 #include "gas/properties.hpp"
@@ -16,12 +17,6 @@ Outcome<gas::Datum> datum_in(Word word, std::uint8_t argument) {
   if (datum) return *datum;
   return Failure{Fault::unknown_word, argument,
                  "is no datum: write \"formation\", \"0 °C\", \"15 °C\" or \"25 °C\""};
-}
-
-template <class Q>
-Outcome<Q> as(const Outcome<double>& value) {
-  if (!value) return value.failure();
-  return Q{*value};
 }
 
 Outcome<Enthalpy> gas_enthalpy(const Mixture& mixture, Temperature t, Word word) {

@@ -4,6 +4,7 @@
 #include <string>
 
 #include "air/humidity.hpp"
+#include "functions/as.hpp"
 #include "functions/functions.hpp"
 #include "functions/humid_air_arguments.hpp"
 
@@ -11,12 +12,6 @@ namespace busbar::functions {
 namespace {
 
 using OptionalWord = std::optional<Word>;
-
-template <class Q>
-Outcome<Q> as(const Outcome<double>& outcome) {
-  if (!outcome) return outcome.failure();
-  return Q{*outcome};
-}
 
 Outcome<Number> ratio_at_relative_humidity(Pressure p, Temperature t, Fraction relative,
                                            OptionalWord word) {

@@ -3,6 +3,7 @@
 
 #include "catalogue/sentence.hpp"
 #include "core/text.hpp"
+#include "functions/as.hpp"
 #include "functions/describe.hpp"
 #include "functions/functions.hpp"
 #include "functions/sources.hpp"
@@ -11,12 +12,6 @@
 
 namespace busbar::functions {
 namespace {
-
-template <class Q>
-Outcome<Q> as(const Outcome<double>& outcome) {
-  if (!outcome) return outcome.failure();
-  return Q{*outcome};
-}
 
 Outcome<Stream> turbine_out(const Stream& inlet, Pressure outlet, Fraction efficiency) {
   return machine::turbine_out(inlet, outlet.si, efficiency.si);

@@ -3,6 +3,7 @@
 
 #include "catalogue/sentence.hpp"
 #include "core/text.hpp"
+#include "functions/as.hpp"
 #include "functions/functions.hpp"
 #include "functions/steam_arguments.hpp"
 #include "water/transport/conductivity.hpp"
@@ -11,12 +12,6 @@
 
 namespace busbar::functions {
 namespace {
-
-template <class Q>
-Outcome<Q> as(const Outcome<double>& value) {
-  if (!value) return value.failure();
-  return Q{*value};
-}
 
 Outcome<SurfaceTension> surface_tension(Temperature t) {
   return as<SurfaceTension>(water::surface_tension(t.si));

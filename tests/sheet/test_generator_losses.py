@@ -1,27 +1,16 @@
 """The sample workbook generator-losses.ods: its key figures by hand, and what it draws."""
 
 import math
-import shutil
 import zipfile
 
-from harness.case import SheetCase
-from harness.workbook import Workbook, builder, cells, line, names_of, sample
+from harness.workbook import WorkbookCase, builder, cells, sample
 
 WORKBOOK = sample("generator-losses.ods")
 SHEETS = ("Losses", "Chain", "Curve", "Inputs", "Evidence")
 
 
-class GeneratorLossesCase(SheetCase):
-    def setUp(self):
-        super().setUp()
-        self.empty = self.document
-        self.document = self.office.load(shutil.copy(WORKBOOK, self.folder))
-        self.addCleanup(self._close_empty)
-        self.workbook = Workbook(self.document)
-
-    def _close_empty(self):
-        if self.office.alive():
-            self.empty.close()
+class GeneratorLossesCase(WorkbookCase):
+    FILE = "generator-losses.ods"
 
     def assert_value(self, name, expected, digits=9):
         value = self.workbook.value(name)
@@ -130,21 +119,7 @@ class TestChanges(GeneratorLossesCase):
 
 class TestBuilder(GeneratorLossesCase):
     def test_the_committed_file_is_what_the_builder_makes(self):
-        builder("generator_losses").build(self.empty)
-        self.document.recalculate()
-        self.assertEqual(
-            self.empty.model.Sheets.ElementNames, self.document.model.Sheets.ElementNames
-        )
-        self.assertEqual(names_of(self.empty), names_of(self.document))
-        for sheet in SHEETS:
-            fresh, committed = (
-                [line(cell) for _, _, cell in cells(document.sheet(sheet))]
-                for document in (self.empty, self.document)
-            )
-            self.assertEqual(len(fresh), len(committed), sheet)
-            for new, old in zip(fresh, committed):
-                self.assertEqual(new[:3], old[:3])
-                self.assertAlmostEqual(new[3], old[3], delta=1e-9 * abs(old[3]))
+        self.assert_built("generator_losses", SHEETS)
 
     def test_it_prints_one_page_wide_on_a4(self):
         report = builder("report")

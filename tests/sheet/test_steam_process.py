@@ -1,26 +1,15 @@
 """The sample workbook steam-process.ods: its figures by another road, and what its charts draw."""
 
-import shutil
 import zipfile
 
-from harness.case import SheetCase
-from harness.workbook import Workbook, builder, cells, line, names_of, sample
+from harness.workbook import WorkbookCase, builder, cells, sample
 
 WORKBOOK = sample("steam-process.ods")
 PRINTED = ("Process", "Cycle", "Balance", "Inputs", "Evidence")
 
 
-class SteamProcessCase(SheetCase):
-    def setUp(self):
-        super().setUp()
-        self.empty = self.document
-        self.document = self.office.load(shutil.copy(WORKBOOK, self.folder))
-        self.addCleanup(self._close_empty)
-        self.workbook = Workbook(self.document)
-
-    def _close_empty(self):
-        if self.office.alive():
-            self.empty.close()
+class SteamProcessCase(WorkbookCase):
+    FILE = "steam-process.ods"
 
     def column(self, address):
         """Numbers of a range as a chart names it; None at an empty cell, where the pen is lifted."""
@@ -238,21 +227,7 @@ class TestDiagrams(SteamProcessCase):
 
 class TestBuilder(SteamProcessCase):
     def test_the_committed_file_is_what_the_builder_makes(self):
-        builder("steam_process").build(self.empty)
-        self.document.recalculate()
-        self.assertEqual(
-            self.empty.model.Sheets.ElementNames, self.document.model.Sheets.ElementNames
-        )
-        self.assertEqual(names_of(self.empty), names_of(self.document))
-        for sheet in PRINTED:
-            fresh, committed = (
-                [line(cell) for _, _, cell in cells(document.sheet(sheet))]
-                for document in (self.empty, self.document)
-            )
-            self.assertEqual(len(fresh), len(committed), sheet)
-            for new, old in zip(fresh, committed):
-                self.assertEqual(new[:3], old[:3])
-                self.assertAlmostEqual(new[3], old[3], delta=1e-9 * abs(old[3]))
+        self.assert_built("steam_process", PRINTED)
 
     def test_it_prints_one_page_wide_on_a4(self):
         report = builder("report")

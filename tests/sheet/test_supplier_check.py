@@ -1,11 +1,9 @@
 """The sample workbook supplier-check.ods: what it finds, and that it finds it by formulas."""
 
-import shutil
 import zipfile
 from xml.etree import ElementTree
 
-from harness.case import SheetCase
-from harness.workbook import Workbook, builder, cells, line, names_of, sample
+from harness.workbook import Workbook, WorkbookCase, builder, cells, sample
 
 WORKBOOK = sample("supplier-check.ods")
 
@@ -48,17 +46,9 @@ class SupplierCheck(Workbook):
         return area.getCellByPosition(area.Columns.Count - 1, row).getString()
 
 
-class SupplierCheckCase(SheetCase):
-    def setUp(self):
-        super().setUp()
-        self.empty = self.document
-        self.document = self.office.load(shutil.copy(WORKBOOK, self.folder))
-        self.addCleanup(self._close_empty)
-        self.workbook = SupplierCheck(self.document)
-
-    def _close_empty(self):
-        if self.office.alive():
-            self.empty.close()
+class SupplierCheckCase(WorkbookCase):
+    FILE = "supplier-check.ods"
+    NAMED = SupplierCheck
 
     def assert_verdicts(self, **changed):
         self.assertEqual(self.workbook.verdicts(), {**PLANTED, **changed})
@@ -342,21 +332,7 @@ class TestSecondOpinion(SupplierCheckCase):
 
 class TestBuilder(SupplierCheckCase):
     def test_the_committed_file_is_what_the_builder_makes(self):
-        builder("supplier_check").build(self.empty)
-        self.document.recalculate()
-        self.assertEqual(
-            self.empty.model.Sheets.ElementNames, self.document.model.Sheets.ElementNames
-        )
-        self.assertEqual(names_of(self.empty), names_of(self.document))
-        for sheet in self.document.model.Sheets.ElementNames:
-            fresh, committed = (
-                [line(cell) for _, _, cell in cells(document.sheet(sheet))]
-                for document in (self.empty, self.document)
-            )
-            self.assertEqual(len(fresh), len(committed), sheet)
-            for new, old in zip(fresh, committed):
-                self.assertEqual(new[:3], old[:3])
-                self.assertAlmostEqual(new[3], old[3], delta=1e-9 * abs(old[3]))
+        self.assert_built("supplier_check", self.document.model.Sheets.ElementNames)
 
     def test_the_report_prints_every_claim(self):
         report = builder("report")

@@ -2,7 +2,10 @@
 
 import importlib
 import os
+import shutil
 import sys
+
+from harness.case import SheetCase
 
 ROOT = os.path.dirname(os.path.dirname(os.path.dirname(os.path.dirname(os.path.abspath(__file__)))))
 SAMPLES = os.path.join(ROOT, "sample-sheets")
@@ -48,6 +51,43 @@ class Workbook:
         else:
             cell.setValue(content)
         return self
+
+
+class WorkbookCase(SheetCase):
+    """A fresh copy of a sample workbook in `document`, its cells by name in `workbook`, and an empty
+    document in `empty`."""
+
+    FILE = ""  # the file in sample-sheets
+    NAMED = Workbook  # what gives the cells by name
+
+    def setUp(self):
+        super().setUp()
+        self.empty = self.document
+        self.document = self.office.load(shutil.copy(sample(self.FILE), self.folder))
+        self.addCleanup(self._close_empty)
+        self.workbook = self.NAMED(self.document)
+
+    def _close_empty(self):
+        if self.office.alive():
+            self.empty.close()
+
+    def assert_built(self, module, sheets):
+        """The committed file is what the builder makes."""
+        builder(module).build(self.empty)
+        self.document.recalculate()
+        self.assertEqual(
+            self.empty.model.Sheets.ElementNames, self.document.model.Sheets.ElementNames
+        )
+        self.assertEqual(names_of(self.empty), names_of(self.document))
+        for sheet in sheets:
+            fresh, committed = (
+                [line(cell) for _, _, cell in cells(document.sheet(sheet))]
+                for document in (self.empty, self.document)
+            )
+            self.assertEqual(len(fresh), len(committed), sheet)
+            for new, old in zip(fresh, committed):
+                self.assertEqual(new[:3], old[:3])
+                self.assertAlmostEqual(new[3], old[3], delta=1e-9 * abs(old[3]))
 
 
 def cells(sheet):
